@@ -22,7 +22,10 @@ export default ts.config(
 			'no-empty': 'error',
 			'@typescript-eslint/no-explicit-any': 'error',
 			'@typescript-eslint/no-non-null-assertion': 'error',
-			'@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
+			'@typescript-eslint/no-unused-vars': [
+				'error',
+				{ argsIgnorePattern: '^_', varsIgnorePattern: '^_' }
+			],
 			// Links are made by $lib/links; the app is served from the root.
 			'svelte/no-navigation-without-resolve': 'off'
 		}

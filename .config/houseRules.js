@@ -14,7 +14,15 @@ const mayImport = {
 	safety: ['units', 'dynamics', 'dome', 'measurements', 'starfield', 'show', 'picture']
 };
 const pure = new Set(Object.keys(mayImport));
-const forbiddenPackages = [/^svelte/, /^three/, /^@threlte\//, /^\$app\//, /^\$env\//, /^drizzle-orm/, /^pg$/];
+const forbiddenPackages = [
+	/^svelte/,
+	/^three/,
+	/^@threlte\//,
+	/^\$app\//,
+	/^\$env\//,
+	/^drizzle-orm/,
+	/^pg$/
+];
 
 /** @param {string} file @returns {string | null} the folder under src/lib that holds the file */
 function roomOf(file) {
@@ -31,7 +39,11 @@ function resolve(file, specifier) {
 
 /** @type {import('eslint').Rule.RuleModule} */
 export const importsOneWay = {
-	meta: { type: 'problem', docs: { description: 'imports point one way through the house' }, schema: [] },
+	meta: {
+		type: 'problem',
+		docs: { description: 'imports point one way through the house' },
+		schema: []
+	},
 	create(context) {
 		const from = roomOf(context.filename);
 		if (!from) return {};
@@ -45,7 +57,10 @@ export const importsOneWay = {
 			}
 			const target = resolve(context.filename, specifier);
 			if (isPure && specifier.startsWith('$')) {
-				context.report({ node, message: `${from} is a pure room: import ${specifier} by a relative path` });
+				context.report({
+					node,
+					message: `${from} is a pure room: import ${specifier} by a relative path`
+				});
 				return;
 			}
 			if (!target) return;
@@ -56,10 +71,16 @@ export const importsOneWay = {
 			const to = roomOf(target);
 			if (!to || to === from) return;
 			if (isPure && !mayImport[from].includes(to)) {
-				context.report({ node, message: `${from} may not import from ${to}: imports point one way` });
+				context.report({
+					node,
+					message: `${from} may not import from ${to}: imports point one way`
+				});
 			}
 			if (['stage', 'live', 'components'].includes(from) && to === 'server') {
-				context.report({ node, message: `${from} runs in the browser and may not import the server` });
+				context.report({
+					node,
+					message: `${from} runs in the browser and may not import the server`
+				});
 			}
 			if (from === 'server' && ['stage', 'live', 'components'].includes(to)) {
 				context.report({ node, message: `server may not import from ${to}` });

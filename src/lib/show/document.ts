@@ -32,7 +32,10 @@ export const liveControlSchema = z
 		max: z.number(),
 		rest: z.number()
 	})
-	.refine((c) => c.min < c.max, { path: ['max'], message: 'The upper limit must be above the lower one.' })
+	.refine((c) => c.min < c.max, {
+		path: ['max'],
+		message: 'The upper limit must be above the lower one.'
+	})
 	.refine((c) => c.rest >= c.min && c.rest <= c.max, {
 		path: ['rest'],
 		message: 'The resting value must lie between the limits.'

@@ -51,3 +51,27 @@ export interface RingTable {
 	/** Angle turned so far, Φ(r) = ∫Ω dt, radians, not wrapped. */
 	phase: Float64Array;
 }
+
+/** How a galaxy looks; the mass model says how it moves. Kept with the galaxy. */
+export interface GalaxyLook {
+	spiral: SpiralPattern;
+	/** 0 to 1: depth of the dust lanes on the inner edge of the arms. */
+	dust: number;
+	/** Pink gas clouds in the arms, 0 to 1000. */
+	gasClouds: number;
+	/** kpc; stars are sampled and rings kept out to here. */
+	outerRadius: number;
+	/** Colour temperatures, K: the old bulge, the old disc, the young arm stars. */
+	bulgeTemperature: number;
+	discTemperature: number;
+	armTemperature: number;
+}
+
+/** Faint stars of our own sky behind the galaxy: fixed sky directions, not part of any model. */
+export interface BackgroundSky {
+	count: number;
+	/** Unit vectors in the room's frame (see dome/types), three numbers a star. */
+	directions: Float32Array;
+	light: Float32Array;
+	colour: Uint8Array;
+}
