@@ -4,5 +4,6 @@ import { defineConfig } from 'drizzle-kit';
 export default defineConfig({
 	dialect: 'postgresql',
 	schema: './src/lib/server/db/schema',
+	casing: 'snake_case',
 	out: './drizzle'
 });

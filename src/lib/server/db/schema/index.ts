@@ -1,0 +1,6 @@
+export * from './people';
+export * from './audit';
+export * from './galaxies';
+export * from './shows';
+export * from './domes';
+export * from './runs';
