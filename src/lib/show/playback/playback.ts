@@ -32,20 +32,21 @@ export interface Playback {
 /** Folded events of a content, kept so that a frame costs the new events only. Never a truth. */
 const folded = new WeakMap<EditionContent, { events: RunEvent[]; state: PlaybackState }>();
 
-function fold(content: EditionContent, events: readonly RunEvent[]): PlaybackState {
+function fold(content: EditionContent, events: readonly RunEvent[], now: number): PlaybackState {
+	let due = events.length;
+	while (due > 0 && events[due - 1].at > now) due--;
 	const kept = folded.get(content);
 	const count = kept?.events.length ?? 0;
-	const usable =
-		kept && count <= events.length && kept.events.every((event, i) => event === events[i]);
+	const usable = kept && count <= due && kept.events.every((event, i) => event === events[i]);
 	let state = usable ? kept.state : initialState;
-	for (let i = usable ? count : 0; i < events.length; i++)
-		state = transition(content, state, events[i]);
-	if (!usable || events.length > count) folded.set(content, { events: [...events], state });
+	for (let i = usable ? count : 0; i < due; i++) state = transition(content, state, events[i]);
+	if (!usable || due > count) folded.set(content, { events: events.slice(0, due), state });
 	return state;
 }
 
 /**
  * The moment of a run at `now`: a pure function of edition, events and time.
+ * Events later than `now` have not happened yet.
  * @param content must have at least one scene
  * @param events in the order of their numbers
  * @param now milliseconds since 1970 by the server's clock
@@ -58,7 +59,7 @@ export function playbackAt(
 ): Playback {
 	if (content.show.scenes.length === 0)
 		throw new Error('An edition without scenes cannot be played.');
-	const after = fold(content, events);
+	const after = fold(content, events, now);
 	const state = advanceTo(content, after, tickAt(after, now));
 	const scene = content.show.scenes[state.sceneIndex];
 	return {
