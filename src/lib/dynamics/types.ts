@@ -36,25 +36,39 @@ export interface Acceleration {
 	z: number;
 }
 
+/** Squares of the three frequencies of nearly circular orbits in the plane, (km/s/kpc)². */
+export interface FrequencySums {
+	/** Ω². */
+	omega: number;
+	/** κ² = R dΩ²/dR + 4Ω². */
+	kappa: number;
+	/** ν² = ∂²Φ/∂z² at z = 0. */
+	nu: number;
+}
+
 /**
- * What one component must answer. R cylindrical radius, z height, r spherical radius, all in kpc.
- * Everything is linear in the mass, so `factor` is applied outside.
+ * What one component must answer. R cylindrical radius (not negative), z height of either sign,
+ * r spherical radius, all in kpc. Everything is linear in the mass, so `factor` is applied outside.
  */
 export interface MassComponent {
 	/** v² in the plane, (km/s)². May be negative where a component pulls outward. */
 	circularVelocitySquared(R: number): number;
-	/** κ² in the plane, (km/s/kpc)²: R dΩ²/dR + 4Ω². */
-	epicycleFrequencySquared(R: number): number;
-	/** ν² in the plane, (km/s/kpc)²: ∂²Φ/∂z² at z = 0. May be Infinity for razor-thin discs. */
-	verticalFrequencySquared(R: number): number;
+	/**
+	 * Adds scale times its Ω², κ² and ν² to `sums`: one call, so that what they share is computed once.
+	 * `sheetHeight` (kpc) is the exponential scale height to lend a razor-thin disc for ν²;
+	 * at 0 the disc stays razor-thin and ν² is Infinity wherever there is matter in the plane.
+	 */
+	addFrequenciesSquared(R: number, scale: number, sheetHeight: number, sums: FrequencySums): void;
 	/** Msun: inside the sphere r, for discs inside the cylinder R. */
 	enclosedMass(r: number): number;
 	/** (km/s)². */
 	potential(R: number, z: number): number;
 	/** Adds to `out`, so that components can be summed without allocation. (km/s)²/kpc. */
 	addAcceleration(R: number, z: number, scale: number, out: Acceleration): void;
-	/** Msun/kpc³. */
+	/** Msun/kpc³. A razor-thin disc: 0 off the plane, Infinity in it where there is matter. */
 	density(R: number, z: number): number;
+	/** Msun/kpc² of matter lying exactly in the plane; 0 for everything that has thickness. */
+	sheetDensity(R: number): number;
 	/** False where the total mass is infinite in such a way that nothing escapes. */
 	readonly escapable: boolean;
 }
@@ -67,8 +81,13 @@ export interface MassModel {
 	circularFrequency(R: number): number;
 	/** κ, km/s/kpc; NaN where κ² is negative (circular orbits are unstable there). */
 	epicycleFrequency(R: number): number;
-	/** ν, km/s/kpc; NaN where ν² is negative. */
-	verticalFrequency(R: number): number;
+	/**
+	 * ν, km/s/kpc; NaN where ν² is negative. Infinity in the matter of a razor-thin disc, unless
+	 * `sheetHeight` (kpc, 0 where missing) lends such discs an exponential scale height.
+	 */
+	verticalFrequency(R: number, sheetHeight?: number): number;
+	/** Adds Ω², κ² and ν² at R to `sums`: what tables are filled with. */
+	addFrequenciesSquared(R: number, sheetHeight: number, sums: FrequencySums): void;
 	/** Msun; a disc counts its own mass inside the cylinder. Not the dynamical mass v²R/G. */
 	enclosedMass(r: number): number;
 	/** v²R/G, Msun: the mass a spherical body would need for the same speed. */
@@ -77,13 +96,20 @@ export interface MassModel {
 	potential(R: number, z: number): number;
 	/** (km/s)²/kpc, written to `out` and returned. */
 	acceleration(R: number, z: number, out: Acceleration): Acceleration;
-	/** Msun/kpc³. */
+	/** Msun/kpc³. With a razor-thin disc: Infinity at z = 0 where the disc has matter. */
 	density(R: number, z: number): number;
+	/** Msun/kpc² lying exactly in the plane: the razor-thin discs. */
+	sheetDensity(R: number): number;
 	/** km/s in the plane; Infinity where nothing escapes. */
 	escapeVelocity(R: number): number;
+	/** The same model with the lit components only. Cheap: nothing is computed anew. */
 	lit(): MassModel;
+	/** The same model with the unlit components only. */
 	unlit(): MassModel;
+	/** One component's factor replaced. @throws ParameterError unknown id, or outside 0 to 10 */
 	withFactor(componentId: string, factor: number): MassModel;
+	/** All lit and all unlit factors multiplied. @throws ParameterError where one leaves 0 to 10 */
+	mixed(scales: { lit: number; unlit: number }): MassModel;
 }
 
 /** One parameter as a form needs it. */
@@ -91,14 +117,21 @@ export interface ParameterInfo {
 	name: string;
 	/** Plain words for a label, such as "Mass" or "Scale length". */
 	label: string;
+	/** Empty for a pure number. */
 	unit: string;
+	/** Hard limits, both allowed: outside them the parameter is refused. */
 	min: number;
 	max: number;
+	/** Ends for a slider: where real galaxies are. Within min and max. */
+	usualMin: number;
+	usualMax: number;
 	/** Least useful step; on a `log` scale a ratio step is derived from it by the form. */
 	step: number;
 	scale: 'linear' | 'log';
 	/** A sensible value to begin with. */
 	initial: number;
+	/** May be left out; `initial` then stands. Where also min = max, a form has nothing to ask. */
+	optional: boolean;
 	/** One sentence for people who are not astronomers. */
 	help: string;
 }

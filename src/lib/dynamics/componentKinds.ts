@@ -1,0 +1,42 @@
+import { burkert } from './components/burkert';
+import type { ComponentMaker } from './components/ComponentMaker';
+import { exponentialDisk } from './components/exponentialDisk';
+import { hernquist } from './components/hernquist';
+import { kuzminDisk } from './components/kuzminDisk';
+import { miyamotoNagai } from './components/miyamotoNagai';
+import { nfw } from './components/nfw';
+import { plummer } from './components/plummer';
+import { pointMass } from './components/pointMass';
+import { pseudoIsothermal } from './components/pseudoIsothermal';
+import type { ComponentKind, ComponentKindInfo, ParameterSet } from './types';
+
+/** Every kind with its maker. A new kind is one line here and one in `ComponentKind`. */
+export const makers: Record<ComponentKind, ComponentMaker> = {
+	'exponential-disk': exponentialDisk,
+	'miyamoto-nagai': miyamotoNagai,
+	'kuzmin-disk': kuzminDisk,
+	hernquist,
+	plummer,
+	'point-mass': pointMass,
+	nfw,
+	'pseudo-isothermal': pseudoIsothermal,
+	burkert
+};
+
+/** What forms are built from: every kind, in the order people should meet them. */
+export const componentKinds: ComponentKindInfo[] = Object.values(makers).map((maker) => maker.info);
+
+export function isComponentKind(value: unknown): value is ComponentKind {
+	return typeof value === 'string' && Object.hasOwn(makers, value);
+}
+
+/**
+ * Which way of giving the parameters is meant: the one that shares most names with those given,
+ * the first of equals.
+ */
+export function parameterSetOf(kind: ComponentKind, given: readonly string[]): ParameterSet {
+	const { parameterSets } = makers[kind].info;
+	const shared = (set: ParameterSet) =>
+		set.parameters.filter((parameter) => given.includes(parameter.name)).length;
+	return parameterSets.reduce((best, set) => (shared(set) > shared(best) ? set : best));
+}

@@ -1,0 +1,25 @@
+export { massModel } from './massModel';
+export { rotationCurve } from './rotationCurve';
+export {
+	tabulateFrequencies,
+	defaultSheetHeight,
+	type FrequencyTable
+} from './tabulateFrequencies';
+export { componentKinds, isComponentKind, parameterSetOf } from './componentKinds';
+export { criticalDensity, nfwHalo, type NfwHalo } from './components/nfwHalo';
+export { orbitTimeMyr, massBreakdown, type MassBreakdown } from './derived';
+export { ParameterError } from './ParameterError';
+export { specIssues, specLimits, type SpecIssue } from './specIssues';
+export { componentSpecSchema, massModelSpecSchema } from './schema';
+export { milkyWayMcMillan2017, type ShelfGalaxy } from './shelf';
+export type {
+	Acceleration,
+	ComponentKind,
+	ComponentKindInfo,
+	ComponentSpec,
+	FrequencySums,
+	MassModel,
+	MassModelSpec,
+	ParameterInfo,
+	ParameterSet
+} from './types';
