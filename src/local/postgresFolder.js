@@ -1,0 +1,84 @@
+import { spawnSync } from 'node:child_process';
+import { createHash } from 'node:crypto';
+import { chmodSync, chownSync, existsSync, lstatSync, mkdirSync, rmSync } from 'node:fs';
+import { join } from 'node:path';
+import { readJson } from './folders.js';
+import { Refusal } from './refusal.js';
+
+/**
+ * The account PostgreSQL runs as; null for our own. PostgreSQL refuses to run as root.
+ * @typedef {{ uid: number, gid: number } | null} Account
+ */
+
+/** Where the cluster of a root start lives when the postgres account cannot enter the data folder. */
+const elsewhere = '/var/lib/farwheel';
+
+/** @param {string} option */
+function postgresId(option) {
+	const { status, stdout } = spawnSync('id', [option, 'postgres'], { encoding: 'utf8' });
+	if (status !== 0) {
+		throw new Refusal(
+			'PostgreSQL does not run as root, and this machine has no account named postgres. ' +
+				'Start as an ordinary user, or make the account: adduser --system --group postgres'
+		);
+	}
+	return Number(stdout);
+}
+
+/** @param {string} folder of the cluster @returns {Account} */
+export function accountFor(folder) {
+	if (process.getuid?.() !== 0) return null;
+	// A cluster that an ordinary user made before stays that user's.
+	const owner = existsSync(folder) ? lstatSync(folder) : null;
+	if (owner && owner.uid !== 0) return { uid: owner.uid, gid: owner.gid };
+	return { uid: postgresId('-u'), gid: postgresId('-g') };
+}
+
+/** @param {string} folder @param {NonNullable<Account>} account */
+const canEnter = (folder, account) =>
+	spawnSync('test', ['-w', folder], { ...account, cwd: '/' }).status === 0;
+
+/** @param {string} folder @param {Account} account */
+function makeOwned(folder, account) {
+	if (!existsSync(folder)) mkdirSync(folder, { mode: 0o700 });
+	if (!lstatSync(folder).isDirectory()) throw new Refusal(`${folder} is not a folder.`);
+	if (account) chownSync(folder, account.uid, account.gid);
+	chmodSync(folder, 0o700);
+}
+
+/** @param {string} dataFolder @returns {string} the same folder for the same data, start after start */
+const folderElsewhere = (dataFolder) =>
+	join(elsewhere, createHash('sha256').update(dataFolder).digest('hex').slice(0, 12));
+
+/** @param {string} dataFolder @returns {{ folder?: string, port?: number }} what the last start chose */
+export function rememberedPlace(dataFolder) {
+	const kept = readJson(join(dataFolder, 'postgres.json'));
+	return typeof kept === 'object' && kept !== null ? kept : {};
+}
+
+/**
+ * The folder of the private cluster: in the data folder, or, where the postgres account cannot
+ * enter that, under /var/lib/farwheel. Once chosen it stays, since the data is there.
+ * @param {string} dataFolder absolute
+ * @returns {{ folder: string, account: Account }}
+ */
+export function clusterFolder(dataFolder) {
+	const { folder: kept } = rememberedPlace(dataFolder);
+	if (kept && existsSync(kept)) return { folder: kept, account: accountFor(kept) };
+
+	const inside = join(dataFolder, 'postgres');
+	const account = accountFor(inside);
+	const existed = existsSync(inside);
+	makeOwned(inside, account);
+	if (!account || canEnter(inside, account)) return { folder: inside, account };
+	if (!existed) rmSync(inside, { recursive: true });
+
+	mkdirSync(elsewhere, { recursive: true, mode: 0o755 });
+	const outside = folderElsewhere(dataFolder);
+	makeOwned(outside, account);
+	if (canEnter(outside, account)) return { folder: outside, account };
+	throw new Refusal(
+		`The account postgres can enter neither ${dataFolder} nor ${outside}, so the database has no place. ` +
+			'Start from a folder that it can enter, or start as an ordinary user.'
+	);
+}
