@@ -119,7 +119,8 @@ class ComposedModel implements MassModel {
 
 	escapeVelocity(R: number): number {
 		if (this.#present.some(({ component }) => !component.escapable)) return Infinity;
-		return Math.sqrt(-2 * this.potential(R, 0));
+		// 0 − x, because −2 times nothing would be −0.
+		return Math.sqrt(0 - 2 * this.potential(R, 0));
 	}
 
 	lit(): MassModel {

@@ -13,9 +13,9 @@ export interface FreemanFunctions {
 	potential: number;
 }
 
-/** From here on the asymptotic series; its least term there is about e^-32. */
-const FAR = 16;
-const TERMS = 14;
+/** From here on the asymptotic series; its least term there is about e^-40. */
+const FAR = 20;
+const TERMS = 22;
 
 /**
  * Coefficients b_k of B = (1/2y) Σ b_k (2y)^-2k from k = 1. The products I0K0 and I1K1 both begin
