@@ -17,7 +17,7 @@ import { readSettings } from './settings.js';
 /**
  * Brings Farwheel up on one machine: packages, database, mail, build, app. Needs no package itself.
  *
- *   node src/local/start.js [--dev] [--data <folder>]
+ *   node src/local/start.js [--dev] [--data <folder>] [--no-env-file]
  */
 
 /** What to stop, last started first stopped. @type {(() => Promise<void> | void)[]} */
@@ -47,11 +47,14 @@ function stopOnSignals() {
 
 /** @param {string[]} args */
 function readArguments(args) {
-	const options = { dev: false, dataFolder: defaultDataFolder };
+	const options = { dev: false, dataFolder: defaultDataFolder, envFile: join(root, '.env') };
 	for (let i = 0; i < args.length; i++) {
 		if (args[i] === '--dev') options.dev = true;
 		else if (args[i] === '--data' && args[i + 1]) options.dataFolder = resolve(args[++i]);
-		else throw new Refusal(`Unknown option ${args[i]}. Known: --dev, --data <folder>.`);
+		else if (args[i] === '--no-env-file') options.envFile = '';
+		else {
+			throw new Refusal(`Unknown option ${args[i]}. Known: --dev, --data <folder>, --no-env-file.`);
+		}
 	}
 	return options;
 }
@@ -63,9 +66,8 @@ async function choosePort({ port, portIsFixed, host }) {
 	throw new Refusal(`Port ${port} of ${host} is taken. Stop what uses it, or set PORT to another.`);
 }
 
-/** @param {{ dev: boolean, dataFolder: string }} options */
-async function start({ dev, dataFolder }) {
-	const envFile = join(root, '.env');
+/** @param {ReturnType<typeof readArguments>} options */
+async function start({ dev, dataFolder, envFile }) {
 	if (existsSync(envFile)) process.loadEnvFile(envFile);
 	const settings = readSettings(process.env, { dev });
 	if (Array.isArray(settings)) throw new Refusal(settings.join('\n'));
