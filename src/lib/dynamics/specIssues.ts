@@ -157,7 +157,8 @@ function parameterWords(called: string, info: ParameterInfo, value: unknown): st
 			: typeof value !== 'number' || Number.isNaN(value)
 				? 'is not a number'
 				: 'is out of range';
-	return `${called}: ${label} (${info.name}) ${fault}. Allowed: ${rangeWords(info)}.`;
+	const named = label === info.name ? label : `${label} (${info.name})`;
+	return `${called}: ${named} ${fault}. Allowed: ${rangeWords(info)}.`;
 }
 
 /** How a message names a component: by its name, else by its id. */
