@@ -12,7 +12,7 @@ export async function mailsTo(address: string): Promise<CaughtMail[]> {
 
 /**
  * Waits for a mail that was sent after `since`.
- * @param options subject: part of it, or a pattern; within: milliseconds
+ * @param options within: milliseconds
  * @throws Error naming the subjects that did come
  */
 export async function nextMail(
