@@ -1,0 +1,49 @@
+import { json } from '@sveltejs/kit';
+import { z } from 'zod';
+import { queryable } from '$lib/server/context';
+import { notFound } from '$lib/server/errors';
+import { answering, problem } from '$lib/server/http/problem';
+import { readRun, readRunEdition, sendCommand } from '$lib/server/runs';
+import { channels } from '$lib/server/runs/channels';
+import { notices } from '$lib/server/runs/notices';
+import { readBody } from '$lib/server/runs/readBody';
+import { readPosition, runEventStream } from '$lib/server/runs/runEventStream';
+import type { RequestHandler } from './$types';
+
+const signInFirst = () => problem(401, 'Sign in to follow or command a run.');
+const isId = (id: string) => z.uuid().safeParse(id).success;
+
+/** Everything that happens in a run, as server-sent events; see runEventStream for the protocol. */
+export const GET: RequestHandler = ({ locals, params, request }) =>
+	answering(async () => {
+		const { ctx } = locals;
+		if (!ctx) return signInFirst();
+		if (!isId(params.id)) throw notFound('run');
+		const run = await readRun(ctx, params.id);
+		const { hash } = await readRunEdition(ctx, run);
+		return runEventStream({
+			db: queryable(ctx),
+			notices: notices(),
+			from: readPosition(request, run.id),
+			followed: {
+				run: async () => ({ id: run.id, editionId: run.editionId, hash }),
+				announcesRuns: false,
+				concerns: ({ channel, id }) => channel === channels.runs && id === run.id
+			}
+		});
+	});
+
+const bodySchema = z.strictObject({ command: z.unknown(), idempotencyKey: z.unknown() });
+
+/** One command of a console: {command, idempotencyKey}. */
+export const POST: RequestHandler = ({ locals, params, request }) =>
+	answering(async () => {
+		const { ctx } = locals;
+		if (!ctx) return signInFirst();
+		if (!isId(params.id)) throw notFound('run');
+		const body = bodySchema.safeParse(await readBody(request));
+		if (!body.success) {
+			return problem(400, 'A command is {"command": …, "idempotencyKey": "…"} and nothing else.');
+		}
+		return json(await sendCommand(ctx, { runId: params.id, ...body.data }));
+	});
