@@ -14,7 +14,7 @@ import { join } from 'node:path';
 import { runCommand, tail } from './command.js';
 import { makeDataFolder, writePrivateJson } from './folders.js';
 import { freePort, isFree } from './ports.js';
-import { clusterFolder, rememberedPlace } from './postgresFolder.js';
+import { clusterFolder, knownFolder, rememberedPlace } from './postgresFolder.js';
 import { postgresPrograms } from './postgresPrograms.js';
 import { liveServer, postmaster, recoverCluster } from './postgresRecovery.js';
 import { endProcess, identify, waitUntil } from './processes.js';
@@ -108,7 +108,8 @@ async function launch(programs, folder, account, port, settings) {
  */
 export async function startCluster({ dataFolder, settings = [] }) {
 	makeDataFolder(dataFolder);
-	if (rememberedPlace(dataFolder).folder === undefined) await postgresPrograms(null);
+	// Before the folder: installing the package makes the account that is to own it.
+	if (knownFolder(dataFolder) === null) await postgresPrograms(null);
 	const { folder, account } = clusterFolder(dataFolder);
 	const cluster = join(folder, 'cluster');
 	const made = existsSync(cluster);
@@ -166,8 +167,8 @@ function handle({ programs, folder, port, server }) {
  * @param {string} dataFolder
  */
 export async function stopCluster(dataFolder) {
-	const { folder } = rememberedPlace(dataFolder);
-	if (folder === undefined || !existsSync(join(folder, 'cluster'))) return;
+	const folder = knownFolder(dataFolder);
+	if (folder === null || !existsSync(join(folder, 'cluster'))) return;
 	const server = liveServer(join(folder, 'cluster'));
 	// SIGINT is PostgreSQL's fast shutdown: it ends sessions and leaves a clean cluster.
 	if (server) await endProcess(server.identity, { signal: 'SIGINT', patience: 30_000 });
@@ -179,6 +180,6 @@ export async function stopCluster(dataFolder) {
  */
 export async function destroyCluster(dataFolder) {
 	await stopCluster(dataFolder);
-	const { folder } = rememberedPlace(dataFolder);
-	if (folder !== undefined) rmSync(folder, { recursive: true, force: true });
+	const folder = knownFolder(dataFolder);
+	if (folder !== null) rmSync(folder, { recursive: true, force: true });
 }

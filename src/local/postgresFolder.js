@@ -1,6 +1,15 @@
 import { spawnSync } from 'node:child_process';
 import { createHash } from 'node:crypto';
-import { chmodSync, chownSync, existsSync, lstatSync, mkdirSync, rmSync } from 'node:fs';
+import {
+	chmodSync,
+	chownSync,
+	existsSync,
+	lstatSync,
+	mkdirSync,
+	readFileSync,
+	rmSync,
+	writeFileSync
+} from 'node:fs';
 import { join } from 'node:path';
 import { readJson } from './folders.js';
 import { Refusal } from './refusal.js';
@@ -57,28 +66,62 @@ export function rememberedPlace(dataFolder) {
 }
 
 /**
+ * Whether a folder elsewhere is the cluster of this data folder, and not that of another checkout
+ * this one was copied from. A checkout that was moved takes its cluster along.
+ * @param {string} folder
+ * @param {string} dataFolder
+ */
+function isOurs(folder, dataFolder) {
+	const note = join(folder, 'data-folder');
+	if (!existsSync(note)) return false;
+	const noted = readFileSync(note, 'utf8');
+	return noted === dataFolder || !existsSync(noted);
+}
+
+/**
+ * @param {string} dataFolder absolute
+ * @returns {string | null} where the cluster of this data folder already is
+ */
+export function knownFolder(dataFolder) {
+	const inside = join(dataFolder, 'postgres');
+	if (existsSync(inside)) return inside;
+	const { folder } = rememberedPlace(dataFolder);
+	return folder && existsSync(folder) && isOurs(folder, dataFolder) ? folder : null;
+}
+
+/**
  * The folder of the private cluster: in the data folder, or, where the postgres account cannot
  * enter that, under /var/lib/farwheel. Once chosen it stays, since the data is there.
  * @param {string} dataFolder absolute
  * @returns {{ folder: string, account: Account }}
  */
 export function clusterFolder(dataFolder) {
-	const { folder: kept } = rememberedPlace(dataFolder);
-	if (kept && existsSync(kept)) return { folder: kept, account: accountFor(kept) };
-
 	const inside = join(dataFolder, 'postgres');
+	const known = knownFolder(dataFolder);
+	if (known && known !== inside) {
+		writeFileSync(join(known, 'data-folder'), dataFolder);
+		return { folder: known, account: accountFor(known) };
+	}
 	const account = accountFor(inside);
-	const existed = existsSync(inside);
 	makeOwned(inside, account);
 	if (!account || canEnter(inside, account)) return { folder: inside, account };
-	if (!existed) rmSync(inside, { recursive: true });
+	if (existsSync(join(inside, 'cluster'))) {
+		throw new Refusal(
+			`The account that owns the database in ${inside} can no longer enter that folder. ` +
+				'Let it through (chmod o+x on the folders above), then start again.'
+		);
+	}
+	rmSync(inside, { recursive: true });
 
 	mkdirSync(elsewhere, { recursive: true, mode: 0o755 });
 	const outside = folderElsewhere(dataFolder);
 	makeOwned(outside, account);
-	if (canEnter(outside, account)) return { folder: outside, account };
-	throw new Refusal(
-		`The account postgres can enter neither ${dataFolder} nor ${outside}, so the database has no place. ` +
-			'Start from a folder that it can enter, or start as an ordinary user.'
-	);
+	if (!canEnter(outside, account)) {
+		throw new Refusal(
+			`The account postgres can enter neither ${dataFolder} nor ${outside}, so the database has no place. ` +
+				'Start from a folder that it can enter, or start as an ordinary user.'
+		);
+	}
+	writeFileSync(join(outside, 'data-folder'), dataFolder);
+	return { folder: outside, account };
 }
