@@ -11,6 +11,7 @@ export const links = {
 	shows: () => '/shows',
 	show: (id: string) => `/shows/${id}`,
 	showDocument: (id: string) => `/shows/${id}/document`,
+	showFreeze: (id: string) => `/shows/${id}/freeze`,
 	preview: (id: string) => `/shows/${id}/preview`,
 	editions: (showId: string) => `/shows/${showId}/editions`,
 	edition: (id: string) => `/editions/${id}`,
