@@ -2,8 +2,10 @@ import { createHash } from 'node:crypto';
 import { existsSync, readFileSync, readdirSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { runCommand, tail } from './command.js';
+import { defaultDataFolder } from './folders.js';
 import { withProgress } from './progress.js';
 import { Refusal } from './refusal.js';
+import { runningNow } from './running.js';
 
 /** What a build is made from. */
 const sources = ['src', 'static', 'svelte.config.js', 'vite.config.ts', 'package-lock.json'];
@@ -49,10 +51,17 @@ export function buildIsStale(root) {
  * Builds where the build is stale.
  * @param {string} root
  * @returns {Promise<boolean>} whether it built
- * @throws {Refusal} with the end of the build's output
+ * @throws {Refusal} with the end of the build's output, or where an app runs from the old build
  */
 export async function buildApp(root) {
 	if (!buildIsStale(root)) return false;
+	const running = runningNow(defaultDataFolder);
+	if (running?.app && !running.dev && running.starter.pid !== process.pid) {
+		throw new Refusal(
+			'The sources changed since the last build, and Farwheel runs from that build ' +
+				`(process ${running.starter.pid}). Stop it with Ctrl-C first: a new build would break it.`
+		);
+	}
 	// Taken before the build: a file changed meanwhile makes the next start build again.
 	const hash = sourceHash(root);
 	await withProgress('Building the app', async () => {

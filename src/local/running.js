@@ -9,6 +9,7 @@ import { identify, stillRuns } from './processes.js';
  * @typedef {object} RunningRecord
  * @property {import('./processes.js').ProcessIdentity} starter
  * @property {import('./processes.js').ProcessIdentity} [app]
+ * @property {boolean} [dev] it is Vite's server, not the build
  * @property {string} [address] set once the app answers
  * @property {string} [mailPage]
  * @property {string} [databaseUrl] of the stand-in

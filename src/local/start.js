@@ -94,7 +94,7 @@ async function start({ dev, dataFolder, envFile }) {
 	delete env.FARWHEEL_DEMO;
 	env.AUTH_SECRET ||= secrets(dataFolder).authSecret;
 	/** @type {Omit<import('./running.js').RunningRecord, 'starter'>} */
-	const facts = {};
+	const facts = { dev };
 	let databaseFolder;
 	if (settings.standInDatabase) {
 		started.push(() => stopCluster(dataFolder));

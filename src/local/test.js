@@ -101,7 +101,13 @@ try {
 	const onStop = (stop) => toStop.push(stop);
 	for (const step of chosen) {
 		if (cleaning) break;
-		results.push(await run(step, { scratch, reports, filters, onStop }));
+		const counts = await run(step, { scratch, reports, filters, onStop });
+		results.push(counts);
+		if (step.name === 'build' && counts.failed > 0 && chosen.some(({ name }) => name === 'e2e')) {
+			console.log('e2e: 0 passed, 1 failed (not run, since there is no build)');
+			results.push(oneCheck(false));
+			break;
+		}
 	}
 } catch (error) {
 	console.error(error instanceof Refusal ? error.message : error);
