@@ -27,12 +27,21 @@ export function packagesAreStale(root) {
 	return !existsSync(stampFile(root)) || readFileSync(stampFile(root), 'utf8') !== lockHash(root);
 }
 
+/** @param {string} version such as "20.19.0" @returns {boolean} whether the packages run on it */
+export function nodeIsNewEnough(version) {
+	const [major, minor] = version.split('.').map(Number);
+	return major > 20 || (major === 20 && minor >= 19);
+}
+
 /**
  * Runs `npm ci` where it is needed.
  * @param {string} root
- * @throws {Refusal} where npm fails, with the end of its output
+ * @throws {Refusal} where npm fails, with the end of its output, or Node is too old
  */
 export async function installPackages(root) {
+	if (!nodeIsNewEnough(process.versions.node)) {
+		throw new Refusal(`Farwheel needs Node 20.19 or later; this is ${process.versions.node}.`);
+	}
 	if (!packagesAreStale(root)) return;
 	// The npm that runs us, or the one on the path.
 	const npm = process.env.npm_execpath;

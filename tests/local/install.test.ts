@@ -2,7 +2,7 @@ import { mkdirSync, utimesSync, writeFileSync } from 'node:fs';
 import { createHash } from 'node:crypto';
 import { join } from 'node:path';
 import { expect, test } from 'vitest';
-import { packagesAreStale } from '../../src/local/install.js';
+import { nodeIsNewEnough, packagesAreStale } from '../../src/local/install.js';
 import { temporaryFolder } from './temporaryFolder';
 
 const lock = '{"lockfileVersion":3}';
@@ -40,4 +40,9 @@ test('packages are fresh where a checkout only touched the lock they were instal
 	writeFileSync(join(root, 'package-lock.json'), '{"lockfileVersion":3,"changed":true}');
 	utimesSync(join(root, 'package-lock.json'), Date.now() / 1000 + 20, Date.now() / 1000 + 20);
 	expect(packagesAreStale(root)).toBe(true);
+});
+
+test('nodeIsNewEnough knows the first version that will do', () => {
+	const versions = ['18.20.4', '20.18.3', '20.19.0', '22.1.0'];
+	expect(versions.map(nodeIsNewEnough)).toEqual([false, false, true, true]);
 });
