@@ -30,6 +30,8 @@ export const links = {
 	apiTime: () => '/api/time',
 	apiRunEvents: (id: string) => `/api/runs/${id}/events`,
 	apiPairing: () => '/api/screen/pairing',
+	apiClaim: () => '/api/screen/pairing/claim',
 	apiScreen: () => '/api/screen',
-	apiScreenEvents: () => '/api/screen/events'
+	apiScreenEvents: () => '/api/screen/events',
+	apiScreenEdition: (id: string) => `/api/screen/edition/${id}`
 } as const;

@@ -1,4 +1,5 @@
 import { eventParser, type StreamEvent } from './eventParser';
+import { pause } from './pause';
 
 export type LinkState = 'connecting' | 'open' | 'lost' | 'refused';
 
@@ -19,19 +20,6 @@ export interface FollowOptions {
 }
 
 const final = new Set([401, 403, 404]);
-
-const pause = (ms: number, signal: AbortSignal) =>
-	new Promise<void>((resolve) => {
-		const timer = setTimeout(resolve, ms);
-		signal.addEventListener(
-			'abort',
-			() => {
-				clearTimeout(timer);
-				resolve();
-			},
-			{ once: true }
-		);
-	});
 
 /**
  * Follows a stream of server-sent events until `signal` ends it or the server refuses. Comes back by
