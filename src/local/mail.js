@@ -68,6 +68,8 @@ export async function startMailCatcher({ dataFolder, pagePort }) {
 	const smtp = new SMTPServer({
 		disabledCommands: ['AUTH', 'STARTTLS'],
 		size: 1024 * 1024,
+		// A client that holds its connection open must not hold up a stop.
+		closeTimeout: 1000,
 		onData(stream, session, callback) {
 			simpleParser(stream).then(
 				(mail) => {

@@ -4,15 +4,19 @@ const quietSeconds = 15;
 /** @param {number} since milliseconds */
 export const elapsed = (since) => `${((Date.now() - since) / 1000).toFixed(1)} s`;
 
+let busy = false;
+
 /**
  * Runs a step that may be slow and shows how long it has been at it: a counting line on a terminal,
- * a line now and then elsewhere.
+ * a line now and then elsewhere. A step within a step shows nothing of its own.
  * @template T
  * @param {string} label such as "Installing packages"
  * @param {() => Promise<T>} work
  * @returns {Promise<T>}
  */
 export async function withProgress(label, work) {
+	if (busy) return work();
+	busy = true;
 	const began = Date.now();
 	const terminal = process.stdout.isTTY === true;
 	process.stdout.write(terminal ? `${label} …` : `${label} …\n`);
@@ -30,6 +34,7 @@ export async function withProgress(label, work) {
 		return result;
 	} finally {
 		clearInterval(timer);
+		busy = false;
 		const line = `${end} in ${elapsed(began)}`;
 		process.stdout.write(terminal ? `\r${label} … ${line}\n` : `  ${line}\n`);
 	}

@@ -29,7 +29,15 @@ async function stopAll(code) {
 	if (stopping) return;
 	stopping = true;
 	await endCommands();
-	for (const stop of started.reverse()) await stop();
+	for (const stop of started.reverse()) {
+		try {
+			await stop();
+		} catch (error) {
+			// The others are to stop all the same.
+			console.error(error);
+			code = 1;
+		}
+	}
 	process.exit(code);
 }
 
