@@ -15,7 +15,7 @@ export interface StarList {
 	x0: Float32Array;
 	y0: Float32Array;
 	z: Float32Array;
-	/** cos and sin of the star's own arm phase m φ0 − g(r); turned by the ring's arm angle. */
+	/** cos and sin of the star's arm phase at angle zero (`armPhase`); a ring turns it by m(Φ − pattern). */
 	armCos: Float32Array;
 	armSin: Float32Array;
 	/** Linear light of the star, relative; 1 is a typical disc star. */
