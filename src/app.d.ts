@@ -6,6 +6,8 @@ declare global {
 			message: string;
 			/** Given to unexpected failures; everything about them is logged under it. */
 			id?: string;
+			/** The database was away: the same page may work in a moment. */
+			retry?: boolean;
 		}
 		interface Locals {
 			requestId: string;

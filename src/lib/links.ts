@@ -3,6 +3,7 @@ export const links = {
 	home: () => '/',
 	signIn: (next?: string) => (next ? `/sign-in?next=${encodeURIComponent(next)}` : '/sign-in'),
 	signOut: () => '/sign-out',
+	noVenue: () => '/no-venue',
 	forgot: () => '/forgot',
 	reset: (token: string) => `/reset/${token}`,
 	join: (token: string) => `/join/${token}`,

@@ -1,5 +1,11 @@
 import { error, json } from '@sveltejs/kit';
+import { isDatabaseAway } from '../db/databaseAway';
 import { isAppError, type ErrorCode } from '../errors';
+
+export { isDatabaseAway };
+
+export const databaseAwayMessage =
+	'The database does not answer. Nothing was changed. Try again in a moment.';
 
 const statusOf: Record<ErrorCode, number> = {
 	'not-found': 404,
@@ -43,10 +49,7 @@ export async function answering(work: () => Promise<Response>): Promise<Response
 	} catch (thrown) {
 		if (isAppError(thrown)) return problem(statusOf[thrown.code], thrown.message, thrown.details);
 		if (isDatabaseAway(thrown)) {
-			return problem(
-				503,
-				'The database does not answer. Nothing was changed. Try again in a moment.'
-			);
+			return problem(503, databaseAwayMessage);
 		}
 		throw thrown;
 	}
@@ -59,35 +62,8 @@ export async function orError<T>(work: Promise<T>): Promise<T> {
 	} catch (thrown) {
 		if (isAppError(thrown)) error(statusOf[thrown.code], { message: thrown.message });
 		if (isDatabaseAway(thrown)) {
-			error(503, {
-				message: 'The database does not answer. Nothing was changed. Try again in a moment.'
-			});
+			error(503, { message: databaseAwayMessage, retry: true });
 		}
 		throw thrown;
 	}
-}
-
-const awayCodes = new Set([
-	'ECONNREFUSED',
-	'ECONNRESET',
-	'EPIPE',
-	'ENOTFOUND',
-	'ETIMEDOUT',
-	'57P01',
-	'57P02',
-	'57P03',
-	'08006',
-	'08001',
-	'08003'
-]);
-
-/** Whether an error says that PostgreSQL cannot be reached or is shutting down. */
-export function isDatabaseAway(thrown: unknown): boolean {
-	for (let e = thrown; e instanceof Error; e = e.cause) {
-		const code = (e as Error & { code?: string }).code;
-		if (code && awayCodes.has(code)) return true;
-		if (/Connection terminated|timeout exceeded when trying to connect/i.test(e.message))
-			return true;
-	}
-	return false;
 }

@@ -1,0 +1,44 @@
+import { error, type Handle } from '@sveltejs/kit';
+import { readSession } from '../auth/readSession';
+import { sessionCookie } from '../auth/sessionRules';
+import { isDatabaseAway } from '../db/databaseAway';
+import { databaseAwayMessage, problem } from '../http/problem';
+
+/** From the session's cookie to who asks and in which venue. */
+export const session: Handle = async ({ event, resolve }) => {
+	const { name } = sessionCookie(event.url.protocol === 'https:');
+	const token = event.cookies.get(name);
+	if (token) {
+		try {
+			const found = await readSession(token);
+			if (!found) event.cookies.delete(name, { path: '/' });
+			event.locals.person = found?.person ?? null;
+			event.locals.venues =
+				found?.memberships.map(({ venueId, venueName }) => ({ id: venueId, name: venueName })) ??
+				[];
+			if (found?.current) {
+				event.locals.ctx = {
+					...found.current,
+					userId: found.person.id,
+					userName: found.person.name,
+					requestId: event.locals.requestId
+				};
+			}
+		} catch (thrown) {
+			if (!isDatabaseAway(thrown)) throw thrown;
+			// What needs no sign-in goes on as for a stranger: a dome must not notice.
+			if (event.route.id?.startsWith('/api/')) {
+				if (!isOpenApi(event.route.id)) return problem(503, databaseAwayMessage);
+			} else if (!event.route.id?.startsWith('/(stage)/dome')) {
+				error(503, { message: databaseAwayMessage, retry: true });
+			}
+		}
+	}
+	return resolve(event);
+};
+
+/** API routes that answer without a signed-in person. */
+export const isOpenApi = (routeId: string): boolean =>
+	['/api/health', '/api/time', '/api/screen'].some(
+		(open) => routeId === open || routeId.startsWith(`${open}/`)
+	);
