@@ -1,0 +1,81 @@
+import { populations, type GalaxyLook } from '../starfield/types';
+
+/** Entries of one population's table: 128 for the front of an arm and 128 for its inner edge. */
+export const tableSize = 256;
+const half = tableSize / 2;
+
+/** How narrow the arms of each population are: young stars and gas hug the ridge. */
+const sharpness = { bulge: 0, disc: 1.2, arm: 4, 'gas-cloud': 9 } as const;
+/** Light between the arms, as a share of that on the ridge at full strength. */
+const floor = { bulge: 1, disc: 0.62, arm: 0.1, 'gas-cloud': 0 } as const;
+/** The dust lane runs this far behind the ridge (radians of arm phase) and is this wide. */
+const laneAt = -0.85;
+const laneWidth = 0.34;
+/** How much of each population's light the lane takes: gas clouds lie in front of it. */
+const laneTakes = { bulge: 0.25, disc: 0.85, arm: 0.95, 'gas-cloud': 0.3 } as const;
+
+/**
+ * Index of an arm phase in a table: by its cosine, and by the sign of its sine. No arc tangent in
+ * the frame; the GLSL painter computes the same index.
+ */
+export const lightIndex = (cosine: number, sine: number): number =>
+	Math.min(half - 1, ((cosine + 1) * 0.5 * half) | 0) + (sine < 0 ? half : 0);
+
+/**
+ * Light of a star by where it stands in the density wave: four tables of 256, in the order of
+ * `populations`. 1 is the light on the ridge of an arm; without arms everything is 1.
+ */
+export function lightTables(look: GalaxyLook): Float32Array {
+	const tables = new Float32Array(populations.length * tableSize).fill(1);
+	const { arms, strength } = look.spiral;
+	if (arms === 0) return tables;
+	populations.forEach((population, p) => {
+		for (let i = 0; i < tableSize; i++) {
+			const cosine = (((i % half) + 0.5) / half) * 2 - 1;
+			const phase = Math.acos(cosine) * (i < half ? 1 : -1);
+			const ridge = Math.exp((cosine - 1) * sharpness[population]);
+			const low = 1 - (1 - floor[population]) * strength;
+			const wave = low + (1 - low) * ridge;
+			const lane = Math.exp(-(((phase - laneAt) / laneWidth) ** 2));
+			tables[p * tableSize + i] = wave * (1 - look.dust * laneTakes[population] * lane);
+		}
+	});
+	return tables;
+}
+
+/** Film across and star count at which a star of light 1 has the brightness below. */
+const referenceFilm = 2048;
+const referenceCount = 100_000;
+/** Brightness (of 255, summed over its pixels) of a star of light 1 at the reference. */
+const starBrightness = 74;
+
+/**
+ * Brightness of a star of light 1: fewer stars on a larger film must each give more, so that the
+ * galaxy keeps its surface brightness. Kept within what eight bits can show.
+ * @param filmSize pixels across @param count stars of the galaxy
+ */
+export function starGain(filmSize: number, count: number): number {
+	const spread = (filmSize / referenceFilm) ** 2 * (referenceCount / Math.max(1, count));
+	return starBrightness * Math.min(2.4, Math.max(0.55, spread ** 0.6));
+}
+
+/** Radius in pixels of a sprite of size 1 is one; larger ones grow with the film. */
+export const spriteRadius = (size: number, filmSize: number): number =>
+	Math.max(1, (size * filmSize) / referenceFilm);
+
+/** Light of a background star of light 1, of 255. */
+export const backgroundBrightness = 46;
+
+/** Brightness in the middle of a soft spot against that of a point of the same light. */
+export const spotShare = 0.34;
+
+/** Stars that would add less than this share of white are left out; eight bits cannot hold them. */
+export const dimmestLight = 0.004;
+
+/**
+ * A near star is brighter, by the square of its distance, up to four times; at the reference
+ * distance (twice the outer radius) it is 1, and the surface keeps its brightness as it shrinks.
+ * @param reference2 and @param distance2 squared distances, kpc²
+ */
+export const nearnessLight = (reference2: number, distance2: number): number =>
+	Math.min(4, reference2 / distance2);
