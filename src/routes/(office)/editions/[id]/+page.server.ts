@@ -1,0 +1,14 @@
+import { orError } from '$lib/server/http/problem';
+import { may } from '$lib/server/permissions';
+import { readEdition } from '$lib/server/shows';
+import { contextOf } from '../../shows/contextOf';
+import type { PageServerLoad } from './$types';
+
+export const load: PageServerLoad = async ({ locals, params }) => {
+	const ctx = contextOf(locals);
+	return {
+		edition: await orError(readEdition(ctx, params.id)),
+		mayRun: may(ctx.roles, 'run.start'),
+		timeZone: ctx.timeZone
+	};
+};

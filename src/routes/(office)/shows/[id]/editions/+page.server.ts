@@ -1,0 +1,9 @@
+import { orError } from '$lib/server/http/problem';
+import { listEditions } from '$lib/server/shows';
+import { contextOf } from '../../contextOf';
+import type { PageServerLoad } from './$types';
+
+export const load: PageServerLoad = async ({ locals, params }) => {
+	const ctx = contextOf(locals);
+	return { ...(await orError(listEditions(ctx, params.id))), timeZone: ctx.timeZone };
+};

@@ -1,0 +1,24 @@
+import { AppError, isAppError } from '$lib/server/errors';
+import { readBody } from '$lib/server/runs/readBody';
+
+/** Largest show document taken, bytes. Two hundred scenes with long scripts fit. */
+export const largestDocument = 1024 * 1024;
+
+/** @throws AppError too-large above 1 MB, invalid for what is not a JSON object */
+export async function readJson(request: Request): Promise<Record<string, unknown>> {
+	const body = await readBody(request, largestDocument).catch((thrown: unknown) => {
+		// The server in front of the app has a limit of its own and says so by a status.
+		const tooLarge =
+			(isAppError(thrown) && thrown.code === 'too-large') ||
+			(typeof thrown === 'object' &&
+				thrown !== null &&
+				'status' in thrown &&
+				thrown.status === 413);
+		if (!tooLarge) throw thrown;
+		throw new AppError('too-large', 'A show may have at most 1 MB. Nothing was saved.');
+	});
+	if (typeof body !== 'object' || body === null || Array.isArray(body)) {
+		throw new AppError('invalid', 'The body must be a JSON object. Nothing was saved.');
+	}
+	return { ...body };
+}
