@@ -5,12 +5,12 @@ export const tableSize = 256;
 const half = tableSize / 2;
 
 /** How narrow the arms of each population are: young stars and gas hug the ridge. */
-const sharpness = { bulge: 0, disc: 1.2, arm: 4, 'gas-cloud': 9 } as const;
+const sharpness = { bulge: 0, disc: 1.1, arm: 2.6, 'gas-cloud': 5 } as const;
 /** Light between the arms, as a share of that on the ridge at full strength. */
-const floor = { bulge: 1, disc: 0.62, arm: 0.1, 'gas-cloud': 0 } as const;
+const floor = { bulge: 1, disc: 0.42, arm: 0.07, 'gas-cloud': 0 } as const;
 /** The dust lane runs this far behind the ridge (radians of arm phase) and is this wide. */
-const laneAt = -0.85;
-const laneWidth = 0.34;
+const laneAt = -1.05;
+const laneWidth = 0.3;
 /** How much of each population's light the lane takes: gas clouds lie in front of it. */
 const laneTakes = { bulge: 0.25, disc: 0.85, arm: 0.95, 'gas-cloud': 0.3 } as const;
 
@@ -47,7 +47,7 @@ export function lightTables(look: GalaxyLook): Float32Array {
 const referenceFilm = 2048;
 const referenceCount = 100_000;
 /** Brightness (of 255, summed over its pixels) of a star of light 1 at the reference. */
-const starBrightness = 74;
+const starBrightness = 145;
 
 /**
  * Brightness of a star of light 1: fewer stars on a larger film must each give more, so that the
@@ -67,7 +67,7 @@ export const spriteRadius = (size: number, filmSize: number): number =>
 export const backgroundBrightness = 46;
 
 /** Brightness in the middle of a soft spot against that of a point of the same light. */
-export const spotShare = 0.34;
+export const spotShare = 0.2;
 
 /** Stars that would add less than this share of white are left out; eight bits cannot hold them. */
 export const dimmestLight = 0.004;

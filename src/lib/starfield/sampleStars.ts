@@ -24,6 +24,10 @@ const bulgeFlattening = 0.72;
 /** Inside this share of the outer radius there are no arms. */
 const armsBegin = 0.075;
 
+/** One star in so many is a soft patch: the light of the many that no film can show singly. */
+const hazeEvery = 40;
+const hazeLight = 0.75;
+
 /** H alpha and its neighbours as the eye would see them: common practice, no source. */
 const cloudColour: [number, number, number] = [255, 96, 150];
 
@@ -36,10 +40,20 @@ export function armPhase(look: GalaxyLook, R: number, azimuth: number): number {
 	return arms * (azimuth + Math.log(Math.max(R, 1e-3)) / Math.tan(pitchDegrees * DEGREE));
 }
 
+/**
+ * Colours drawn away from grey, since a dim film washes them out: what long exposures show rather
+ * than what the eye would see. Common practice, no source.
+ */
+function deepened([r, g, b]: [number, number, number]): [number, number, number] {
+	const grey = (r + g + b) / 3;
+	const away = (c: number) => Math.round(Math.min(255, Math.max(0, grey + (c - grey) * 1.7)));
+	return [away(r), away(g), away(b)];
+}
+
 /** Eighty colours about a temperature, so that no star needs its own spectrum. */
 function palette(temperature: number, spread: number): [number, number, number][] {
 	return Array.from({ length: 80 }, (_, i) =>
-		temperatureColour(temperature * (1 + spread * (i / 40 - 1)))
+		deepened(temperatureColour(temperature * (1 + spread * (i / 40 - 1))))
 	);
 }
 
@@ -123,9 +137,13 @@ export function sampleStars(
 		}
 		const phase = armPhase(look, R, azimuth);
 		// Few stars are bright: light falls off as a power of rank, cut at both ends.
+		const rank = random.next();
+		const haze = !cloud && i % hazeEvery === 0;
 		const light = cloud
-			? 0.5 + 0.5 * random.next()
-			: Math.min(3.2, 0.42 * (1 - random.next()) ** -0.42);
+			? 1.6 + 2.4 * rank
+			: haze
+				? hazeLight
+				: Math.min(3.2, 0.42 * (1 - rank) ** -0.42);
 		drafts.push({
 			ring: ringOf(radii, R),
 			x: R * Math.cos(azimuth),
@@ -137,7 +155,7 @@ export function sampleStars(
 				population === 'gas-cloud'
 					? cloudColour
 					: colours[population][Math.floor(80 * random.next())],
-			size: cloud ? 4 + 5 * random.next() : light > 2.2 ? 1.8 : 1,
+			size: cloud ? 3 + 4 * random.next() : haze ? 4 + 4 * rank : light > 2.2 ? 1.8 : 1,
 			population: populations.indexOf(population)
 		});
 	}

@@ -12,8 +12,10 @@ export interface ComponentProfile {
 
 /** Share of the outer radius inside which the mean surface density is the measure of crowding. */
 const crowdingRadius = 0.32;
+/** Rings denser than this share of that mean count as crowded. */
+const crowdedAt = 0.4;
 /** How strongly crowded rings are thinned: 0 not at all, 1 to one common brightness. */
-const thinning = 0.86;
+const thinning = 0.93;
 
 /**
  * Shares of stars by component and ring: mass, thinned where it is so dense that the film would
@@ -47,7 +49,7 @@ export function starProfiles(spec: MassModelSpec, radii: Float64Array): Componen
 	let within = 0;
 	const reach = crowdingRadius * radii[count - 1];
 	for (let k = 0; k < count && radii[k] < reach; k++) within += mass(k);
-	const common = within / (Math.PI * reach * reach);
+	const common = (crowdedAt * within) / (Math.PI * reach * reach);
 	let total = 0;
 	for (let k = 0; k < count; k++) {
 		const crowded = mass(k) / area(k) / common;
