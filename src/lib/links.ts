@@ -21,6 +21,7 @@ export const links = {
 	galaxyDocument: (id: string) => `/galaxies/${id}/document`,
 	shelfGalaxy: (id: string) => `/galaxies/shelf/${id}`,
 	domes: () => '/domes',
+	newDome: () => '/domes/new',
 	dome: (id: string) => `/domes/${id}`,
 	domeScreen: () => '/dome',
 	runs: () => '/runs',

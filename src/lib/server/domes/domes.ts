@@ -3,6 +3,7 @@ import { audit, inTransaction, queryable, requireRole, type Context } from '../c
 import { domes, runs, screens } from '../db/schema';
 import { AppError, notFound } from '../errors';
 import { screenRevoked } from '../runs/channels';
+import { isId } from './isId';
 import { domeSettingsSchema, type DomeSettings } from './domeSettings';
 
 export type Dome = typeof domes.$inferSelect;
@@ -42,6 +43,7 @@ export async function listDomes(
 /** @throws AppError not-found also for a dome of another venue */
 export async function readDome(ctx: Context, id: string): Promise<Dome> {
 	requireRole(ctx, 'dome.read');
+	if (!isId(id)) throw notFound('dome');
 	const [dome] = await queryable(ctx)
 		.select()
 		.from(domes)
@@ -80,6 +82,7 @@ export async function createDome(ctx: Context, input: unknown): Promise<Dome> {
 
 export async function updateDome(ctx: Context, id: string, input: unknown): Promise<Dome> {
 	requireRole(ctx, 'dome.edit');
+	if (!isId(id)) throw notFound('dome');
 	const settings = parsed(input);
 	return inTransaction(ctx, async (tx) => {
 		const [dome] = await tx
@@ -101,6 +104,7 @@ export async function updateDome(ctx: Context, id: string, input: unknown): Prom
 /** Archives a dome and revokes its screens, or brings it back without them. */
 export async function archiveDome(ctx: Context, id: string, archived = true): Promise<void> {
 	requireRole(ctx, 'dome.edit');
+	if (!isId(id)) throw notFound('dome');
 	await inTransaction(ctx, async (tx) => {
 		const [dome] = await tx
 			.select({ id: domes.id })

@@ -4,6 +4,7 @@ import { database, type Database } from '../db/database';
 import { domes, screens } from '../db/schema';
 import { notFound } from '../errors';
 import { screenRevoked } from '../runs/channels';
+import { isId } from './isId';
 import { hashSecret } from './pairingCode';
 
 export type Screen = typeof screens.$inferSelect;
@@ -44,6 +45,7 @@ export async function listScreens(ctx: Context, domeId?: string): Promise<Screen
 /** Ends a screen's token at once; its page shows a pairing code again. */
 export async function revokeScreen(ctx: Context, id: string): Promise<void> {
 	requireRole(ctx, 'screen.revoke');
+	if (!isId(id)) throw notFound('screen');
 	await inTransaction(ctx, async (tx) => {
 		const [screen] = await tx
 			.update(screens)

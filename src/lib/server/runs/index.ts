@@ -1,3 +1,4 @@
+export { editionsToRun, type EditionToRun } from './editionsToRun';
 export { eventsAfter } from './runEvents';
 export { listRuns, openRunOf, readRun, readRunEdition, type Run, type RunListed } from './readRuns';
 export { runLog, type ActEntry, type RunLog, type SceneEntry } from './runLog';

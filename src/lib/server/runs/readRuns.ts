@@ -2,6 +2,7 @@ import { and, desc, eq, getTableColumns, isNull, sql } from 'drizzle-orm';
 import { queryable, requireRole, type Context } from '../context';
 import type { Queryable } from '../db/database';
 import { domes, editions, runs, users } from '../db/schema';
+import { isId } from '../domes/isId';
 import { notFound } from '../errors';
 import { editionOf, type RunEdition } from './editionOf';
 
@@ -42,6 +43,7 @@ export async function listRuns(ctx: Context, { limit = 200 } = {}): Promise<RunL
 /** @throws AppError not-found also for a run of another venue */
 export async function readRun(ctx: Context, id: string): Promise<RunListed> {
 	requireRole(ctx, 'run.read');
+	if (!isId(id)) throw notFound('run');
 	const [run] = await joined(queryable(ctx)).where(
 		and(eq(runs.id, id), eq(runs.venueId, ctx.venueId))
 	);

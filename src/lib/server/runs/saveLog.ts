@@ -2,6 +2,7 @@ import { and, eq } from 'drizzle-orm';
 import { z } from 'zod';
 import { audit, inTransaction, requireRole, type Context } from '../context';
 import { runs } from '../db/schema';
+import { isId } from '../domes/isId';
 import { AppError, notFound } from '../errors';
 
 export const runLogSchema = z.object({
@@ -22,6 +23,7 @@ export async function saveLog(
 	input: { headCount: unknown; remarks: unknown }
 ): Promise<void> {
 	requireRole(ctx, 'run.log');
+	if (!isId(id)) throw notFound('run');
 	const result = runLogSchema.safeParse(input);
 	if (!result.success) {
 		const [issue] = result.error.issues;

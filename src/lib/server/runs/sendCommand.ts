@@ -3,6 +3,7 @@ import { z } from 'zod';
 import { playbackAt, runCommandSchema } from '../../show/playback';
 import { audit, inTransaction, requireRole, type Context } from '../context';
 import { runEvents, runs } from '../db/schema';
+import { isId } from '../domes/isId';
 import { AppError, notFound } from '../errors';
 import { runChanged } from './channels';
 import { editionOf } from './editionOf';
@@ -33,6 +34,7 @@ export async function sendCommand(
 ): Promise<CommandAnswer> {
 	requireRole(ctx, 'run.command');
 	const { runId, ...body } = input;
+	if (!isId(runId)) throw notFound('run');
 	const result = sentCommandSchema.safeParse(body);
 	if (!result.success) {
 		const [issue] = result.error.issues;

@@ -2,6 +2,7 @@ import { and, eq, isNull } from 'drizzle-orm';
 import { links } from '../../links';
 import { audit, inTransaction, requireRole, type Context } from '../context';
 import { domes, editions, runs } from '../db/schema';
+import { isId } from '../domes/isId';
 import { AppError, notFound } from '../errors';
 import { runChanged } from './channels';
 
@@ -15,6 +16,8 @@ export async function startRun(
 	{ editionId, domeId }: { editionId: string; domeId: string }
 ): Promise<{ runId: string }> {
 	requireRole(ctx, 'run.start');
+	if (!isId(editionId)) throw notFound('edition');
+	if (!isId(domeId)) throw notFound('dome');
 	return inTransaction(ctx, async (tx) => {
 		const [edition] = await tx
 			.select({ id: editions.id })

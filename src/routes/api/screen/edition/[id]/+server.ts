@@ -1,5 +1,5 @@
-import { z } from 'zod';
 import { database } from '$lib/server/db/database';
+import { isId } from '$lib/server/domes/isId';
 import { notPaired } from '$lib/server/domes/notPaired';
 import { screenOf } from '$lib/server/domes/screenOf';
 import { notFound } from '$lib/server/errors';
@@ -12,7 +12,7 @@ export const GET: RequestHandler = (event) =>
 	answering(async () => {
 		const known = await screenOf(event);
 		if (!known) return notPaired();
-		if (!z.uuid().safeParse(event.params.id).success) throw notFound('edition');
+		if (!isId(event.params.id)) throw notFound('edition');
 		const edition = await editionOf(database(), event.params.id);
 		if (edition.venueId !== known.screen.venueId) throw notFound('edition');
 		const headers = {
