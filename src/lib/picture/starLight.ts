@@ -64,7 +64,7 @@ export const spriteRadius = (size: number, filmSize: number): number =>
 	Math.max(1, (size * filmSize) / referenceFilm);
 
 /** Light of a background star of light 1, of 255. */
-export const backgroundBrightness = 46;
+export const backgroundBrightness = 110;
 
 /** Brightness in the middle of a soft spot against that of a point of the same light. */
 export const spotShare = 0.2;
