@@ -66,7 +66,10 @@ export async function buildApp(root) {
 	const hash = sourceHash(root);
 	await withProgress('Building the app', async () => {
 		const vite = join(root, 'node_modules', 'vite', 'bin', 'vite.js');
-		const { code, output } = await runCommand(process.execPath, [vite, 'build'], { cwd: root });
+		const { code, output } = await runCommand(process.execPath, [vite, 'build'], {
+			cwd: root,
+			env: { ...process.env, NO_COLOR: '1', FORCE_COLOR: '0' }
+		});
 		if (code !== 0) throw new Refusal(`The build failed:\n${tail(output, 30)}`);
 	});
 	writeFileSync(stampFile(root), hash);

@@ -44,15 +44,20 @@ async function main(): Promise<number> {
 		return 1;
 	}
 	const { createFirstVenue } = await import('../lib/server/people/firstVenue');
-	const { invitationUrl } = await createFirstVenue({
-		venueName: venue,
-		timeZone: zone,
-		email,
-		origin: process.env.ORIGIN ?? ''
-	});
-	console.log(`${venue} is made. An invitation for its manager is on its way to ${email}:`);
-	console.log(`  ${invitationUrl}`);
-	return 0;
+	const { closeDatabase } = await import('../lib/server/db/database');
+	try {
+		const { invitationUrl } = await createFirstVenue({
+			venueName: venue,
+			timeZone: zone,
+			email,
+			origin: process.env.ORIGIN ?? ''
+		});
+		console.log(`${venue} is made. An invitation for its manager is on its way to ${email}:`);
+		console.log(`  ${invitationUrl}`);
+		return 0;
+	} finally {
+		await closeDatabase();
+	}
 }
 
 // Set, not called: output and open connections end first.
