@@ -2,6 +2,8 @@
 export const links = {
 	home: () => '/',
 	signIn: (next?: string) => (next ? `/sign-in?next=${encodeURIComponent(next)}` : '/sign-in'),
+	signInLink: (email: string, token: string, next: string) =>
+		`/sign-in/link?${new URLSearchParams({ email, token, callbackUrl: next })}`,
 	signOut: () => '/sign-out',
 	noVenue: () => '/no-venue',
 	forgot: () => '/forgot',

@@ -4,3 +4,4 @@ export * from './galaxies';
 export * from './shows';
 export * from './domes';
 export * from './runs';
+export * from './mails';

@@ -1,0 +1,37 @@
+import { eq } from 'drizzle-orm';
+import type { Queryable } from '../db/database';
+import { mailsSent } from '../db/schema';
+import { environment } from '../env';
+import { composeLetter } from './composeLetter';
+import { letterKey, type Letter } from './Letter';
+import type { MailTransport } from './transport';
+
+/**
+ * Sends a letter, once in its life.
+ * @returns whether this call sent it
+ * @throws what the transport threw; the letter may then be tried again
+ */
+export async function deliverLetter(
+	letter: Letter,
+	transport: MailTransport,
+	db: Queryable
+): Promise<boolean> {
+	const key = letterKey(letter);
+	const mail = await composeLetter(letter, db);
+	if (!mail) return false;
+	const claimed = await db
+		.insert(mailsSent)
+		.values({ key })
+		.onConflictDoNothing()
+		.returning({ key: mailsSent.key });
+	if (claimed.length === 0) return false;
+	const { hostname } = new URL(environment().ORIGIN);
+	try {
+		await transport.send({ ...mail, messageId: `<${key.replace(':', '.')}@${hostname}>` });
+	} catch (error) {
+		await db.delete(mailsSent).where(eq(mailsSent.key, key));
+		throw error;
+	}
+	await db.update(mailsSent).set({ sentAt: new Date() }).where(eq(mailsSent.key, key));
+	return true;
+}
