@@ -76,12 +76,19 @@ export async function countSignInTry(
 	}
 }
 
-/** After a sign-in that worked: the account starts afresh, the address gets its try back. */
+/**
+ * After a sign-in that worked: the account starts afresh, the address gets its try back.
+ * @param address null where none was counted
+ */
 export async function forgiveSignInTries(
 	account: string,
-	address: string,
+	address: string | null,
 	db: Database = database()
 ): Promise<void> {
 	const { tries, waits } = limitersOf(db);
-	await Promise.all([tries.delete(account), waits.delete(account), tries.reward(address, 1)]);
+	await Promise.all([
+		tries.delete(account),
+		waits.delete(account),
+		address === null ? null : tries.reward(address, 1)
+	]);
 }
