@@ -44,20 +44,15 @@ async function main(): Promise<number> {
 		return 1;
 	}
 	const { createFirstVenue } = await import('../lib/server/people/firstVenue');
-	const { closeDatabase } = await import('../lib/server/db/database');
-	try {
-		const { invitationUrl } = await createFirstVenue({
-			venueName: venue,
-			timeZone: zone,
-			email,
-			origin: process.env.ORIGIN ?? ''
-		});
-		console.log(`${venue} is made. An invitation for its manager is on its way to ${email}:`);
-		console.log(`  ${invitationUrl}`);
-		return 0;
-	} finally {
-		await closeDatabase();
-	}
+	const { invitationUrl } = await createFirstVenue({
+		venueName: venue,
+		timeZone: zone,
+		email,
+		origin: process.env.ORIGIN ?? ''
+	});
+	console.log(`${venue} is made. An invitation for its manager is on its way to ${email}:`);
+	console.log(`  ${invitationUrl}`);
+	return 0;
 }
 
 // Set, not called: output and open connections end first.
