@@ -81,6 +81,21 @@ export class ShowPicture {
 		);
 	}
 
+	/** A text that stays the same while the drawings do: they are made again when it changes. */
+	drawingsKey(playback: Playback): string {
+		const entrance = entranceAt(playback);
+		const hidden = restShare(playback) > 0 || entrance.shows === 'left';
+		return hidden
+			? 'none'
+			: `${playback.scene.id} ${entrance.viewShare} ${JSON.stringify(playback.controls)}`;
+	}
+
+	/** The view of a moment, eased where the stars go on from the scene before. */
+	viewAt(playback: Playback): View {
+		const entrance = entranceAt(playback);
+		return this.#viewOf(playback, entrance, this.#seen(playback, entrance).scene);
+	}
+
 	/**
 	 * The angle a ring of the scene's galaxy has turned and its speed of turning, for checks.
 	 * @param R kpc @returns radians and km/s/kpc at the ring nearest to R; null without a galaxy
