@@ -1,3 +1,4 @@
+import { untrack } from 'svelte';
 import { links } from '../links';
 import type { EditionContent } from '../show/edition';
 import { playbackAt, type Playback, type RunCommand, type RunEvent } from '../show/playback';
@@ -81,7 +82,13 @@ export class ConsoleRun {
 		this.#queue.push(command);
 	}
 
+	/** Begins and goes on until the function it returns is called; to be called once. */
 	start(): () => void {
+		return untrack(() => this.#start());
+	}
+
+	/** Not tracked: an effect that begins it must not begin it again with every event. */
+	#start(): () => void {
 		const ending = new AbortController();
 		const measure = () => void this.#clock.measure().catch(() => null);
 		measure();

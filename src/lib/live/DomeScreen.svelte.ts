@@ -1,3 +1,4 @@
+import { untrack } from 'svelte';
 import { links } from '../links';
 import type { EditionContent } from '../show/edition';
 import type { RunEvent } from '../show/playback';
@@ -38,6 +39,11 @@ export class DomeScreen {
 
 	/** Begins and goes on until the function it returns is called. */
 	start(): () => void {
+		return untrack(() => this.#start());
+	}
+
+	/** Not tracked: an effect that begins it must not begin it again with every event. */
+	#start(): () => void {
 		const ending = new AbortController();
 		this.#restore();
 		void this.#live(ending.signal);
@@ -75,10 +81,16 @@ export class DomeScreen {
 	async #whoAmI(): Promise<number> {
 		const { status, body } = await ask<ScreenIdentity>(links.apiScreen());
 		if (!body) return status;
-		this.identity = body;
+		this.#setIdentity(body);
 		await this.#measure();
 		this.#setRun(body.run);
 		return status;
+	}
+
+	/** The same answer again changes nothing: a picture is not made anew for it. */
+	#setIdentity(identity: ScreenIdentity): void {
+		const same = (a: ScreenIdentity | null) => a && JSON.stringify([a.screen, a.dome]);
+		if (same(this.identity) !== same(identity)) this.identity = identity;
 	}
 
 	async #measure(): Promise<void> {
@@ -90,7 +102,7 @@ export class DomeScreen {
 		if (this.phase !== 'paired') return;
 		const { body } = await ask<ScreenIdentity>(links.apiScreen());
 		if (!body) return;
-		this.identity = body;
+		this.#setIdentity(body);
 		await this.#measure();
 		this.#keep.give(null);
 	}
