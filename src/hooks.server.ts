@@ -1,6 +1,7 @@
 import { sequence } from '@sveltejs/kit/hooks';
 import type { ServerInit } from '@sveltejs/kit';
 import { building } from '$app/environment';
+import { authCallback } from '$lib/server/auth/authjs';
 import { databaseAway } from '$lib/server/hooks/databaseAway';
 import { guard } from '$lib/server/hooks/guard';
 import { reportError } from '$lib/server/hooks/reportError';
@@ -15,6 +16,13 @@ export const init: ServerInit = async () => {
 	process.once('sveltekit:shutdown', shutDown);
 };
 
-export const handle = sequence(requestId, securityHeaders, databaseAway, session, guard);
+export const handle = sequence(
+	requestId,
+	securityHeaders,
+	databaseAway,
+	authCallback,
+	session,
+	guard
+);
 
 export const handleError = reportError;
