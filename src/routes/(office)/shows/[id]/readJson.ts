@@ -4,8 +4,13 @@ import { readBody } from '$lib/server/runs/readBody';
 /** Largest show document taken, bytes. Two hundred scenes with long scripts fit. */
 export const largestDocument = 1024 * 1024;
 
+const tooLargeError = () =>
+	new AppError('too-large', 'A show may have at most 1 MB. Nothing was saved.');
+
 /** @throws AppError too-large above 1 MB, invalid for what is not a JSON object */
 export async function readJson(request: Request): Promise<Record<string, unknown>> {
+	// Answered before the body is read: a connection that is cut in the middle shows no answer.
+	if (Number(request.headers.get('content-length')) > largestDocument) throw tooLargeError();
 	const body = await readBody(request, largestDocument).catch((thrown: unknown) => {
 		// The server in front of the app has a limit of its own and says so by a status.
 		const tooLarge =
@@ -15,7 +20,7 @@ export async function readJson(request: Request): Promise<Record<string, unknown
 				'status' in thrown &&
 				thrown.status === 413);
 		if (!tooLarge) throw thrown;
-		throw new AppError('too-large', 'A show may have at most 1 MB. Nothing was saved.');
+		throw tooLargeError();
 	});
 	if (typeof body !== 'object' || body === null || Array.isArray(body)) {
 		throw new AppError('invalid', 'The body must be a JSON object. Nothing was saved.');

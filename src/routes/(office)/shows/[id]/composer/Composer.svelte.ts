@@ -45,6 +45,8 @@ export class Composer {
 	readonly archived: Record<string, string>;
 	readonly mayEdit: boolean;
 	readonly #options: ComposerOptions;
+	/** False until the page answers: what is pressed before that would be lost. */
+	ready = $state(false);
 	/** The row that is unfolded. */
 	openId = $state<string | null>(null);
 	tab = $state<SettingsTab>('Picture');
