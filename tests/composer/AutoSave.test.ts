@@ -21,6 +21,7 @@ function setUp() {
 		revision: 4,
 		at: '2026-12-01T14:00:00.000Z',
 		delay: 0,
+		retry: 20,
 		send: async (base, document) => {
 			sent.push({ base, summary: document.summary });
 			const revision = base + 1;
@@ -73,6 +74,14 @@ describe('AutoSave', () => {
 		expect(await saving.flush()).toBe(true);
 		expect(sent).toHaveLength(2);
 		expect(kept.draft).toBeNull();
+	});
+
+	it('a failed save is tried again by itself', async () => {
+		const { saving, answers, sent } = setUp();
+		answers.push({ kind: 'failed', why: 'The server cannot be reached.' });
+		saving.schedule(version('a'));
+		await vi.waitFor(() => expect(saving.status.kind).toBe('saved'));
+		expect(sent).toHaveLength(2);
 	});
 
 	it('a conflict stops saving until it is settled, and the draft stays', async () => {

@@ -93,15 +93,23 @@ test('work written without a connection is kept and offered back', async ({
 	signIn
 }) => {
 	await signIn(page, producer);
-	await newShow(page, 'Written offline');
+	const address = await newShow(page, 'Written offline');
 	await addScene(page, 1, 'Tunnel', 'Before the tunnel.');
 	await saved(page);
 	await context.setOffline(true);
 	await page.getByLabel('Script of scene 1').fill('Inside the tunnel.');
 	await expect(page.getByText('not saved: The server cannot be reached.')).toBeVisible();
+	await page.close({ runBeforeUnload: false });
 	await context.setOffline(false);
-	await page.evaluate(() => window.dispatchEvent(new Event('offline')));
-	await saved(page);
+
+	const later = await context.newPage();
+	await later.goto(address);
+	await expect(later.getByLabel('Script of scene 1')).toHaveValue('Before the tunnel.');
+	await later.getByRole('button', { name: 'Bring it back' }).click();
+	await expect(later.getByLabel('Script of scene 1')).toHaveValue('Inside the tunnel.');
+	await saved(later);
+	await later.reload();
+	await expect(later.getByLabel('Script of scene 1')).toHaveValue('Inside the tunnel.');
 });
 
 test('a broken scene keeps a show from being frozen; a whole one becomes edition 1', async ({

@@ -30,6 +30,8 @@ export interface AutoSaveOptions {
 	drafts: DraftStore;
 	/** Milliseconds without a change before a save; the pause a typing person makes. */
 	delay?: number;
+	/** Milliseconds after which a failed save is tried again by itself. */
+	retry?: number;
 }
 
 /**
@@ -117,6 +119,10 @@ export class AutoSave {
 			const answer = await this.#options.send(this.#revision, document);
 			if (answer.kind !== 'saved') {
 				this.#status = answer;
+				if (answer.kind === 'failed') {
+					clearTimeout(this.#timer);
+					this.#timer = setTimeout(() => void this.flush(), this.#options.retry ?? 15_000);
+				}
 				return;
 			}
 			this.#saved = document;
