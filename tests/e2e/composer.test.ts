@@ -84,7 +84,10 @@ test('two tabs in one show lose nothing', async ({ page, context, signIn }) => {
 	await expect(page.getByLabel('Script of scene 1')).toHaveValue('As the second would have it.');
 	await page.goto('/shows?search=Written by two');
 	// The newest comes first; an earlier run may have left its own.
-	await page.getByRole('link', { name: /^Written by two \(/ }).first().click();
+	await page
+		.getByRole('link', { name: /^Written by two \(/ })
+		.first()
+		.click();
 	await expect(page.getByLabel('Script of scene 1')).toHaveValue('As the first would have it.');
 });
 
