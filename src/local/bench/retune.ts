@@ -1,6 +1,6 @@
 import { massModel, tabulateFrequencies, type MassModelSpec } from '../../lib/dynamics';
-import { createRingTable, defaultRingCount } from '../../lib/starfield';
-import { timesOf, type Times } from './times';
+import { createRingTable } from '../../lib/starfield';
+import { times, type Times } from './subject';
 
 const disc = (id: string, surfaceDensity: number, scaleLength: number) => ({
 	id,
@@ -9,7 +9,7 @@ const disc = (id: string, surfaceDensity: number, scaleLength: number) => ({
 	lit: true
 });
 
-/** Eight components of eight parts of a large galaxy, one of almost every kind. */
+/** Eight parts of a large galaxy, of six kinds. */
 const eightComponents: MassModelSpec = {
 	components: [
 		{ id: 'nucleus', kind: 'point-mass', parameters: { mass: 4.2e6 }, lit: true },
@@ -29,15 +29,15 @@ const eightComponents: MassModelSpec = {
 };
 
 /** A full retune: the model made anew from changed numbers, and Ω, κ and ν at every ring of stars. */
-export async function benchRetune(runs = 300): Promise<Times> {
-	const { radii } = createRingTable(25, defaultRingCount);
+export function benchRetune(runs = 300): Times {
+	const { radii } = createRingTable(25);
 	const out = {
 		omega: new Float64Array(radii.length),
 		kappa: new Float64Array(radii.length),
 		nu: new Float64Array(radii.length)
 	};
 	let turn = 0;
-	return timesOf(
+	return times(
 		() => {
 			// Another factor each time, as under a moving slider.
 			const factor = 0.5 + (turn++ % 100) / 100;
