@@ -3,8 +3,8 @@ import type { Draft, DraftStore } from './drafts';
 import type { SaveAnswer } from './saveDocument';
 
 /** The other version of a save that came too late. */
-export interface Conflict {
-	theirs: ShowDocument;
+export interface Conflict<D = ShowDocument> {
+	theirs: D;
 	revision: number;
 	by: string | null;
 	/** ISO 8601. */
@@ -14,20 +14,20 @@ export interface Conflict {
 /** How a conflict is settled; each way keeps both versions. */
 export type Settlement = 'mine' | 'theirs' | 'both';
 
-export type SaveStatus =
+export type SaveStatus<D = ShowDocument> =
 	| { kind: 'saved'; at: string }
 	| { kind: 'waiting' }
 	| { kind: 'saving' }
 	| { kind: 'failed'; why: string }
-	| { kind: 'conflict'; conflict: Conflict };
+	| { kind: 'conflict'; conflict: Conflict<D> };
 
-export interface AutoSaveOptions {
-	document: ShowDocument;
+export interface AutoSaveOptions<D = ShowDocument> {
+	document: D;
 	revision: number;
 	/** When that revision was saved; ISO 8601. */
 	at: string;
-	send: (baseRevision: number, document: ShowDocument) => Promise<SaveAnswer>;
-	drafts: DraftStore;
+	send: (baseRevision: number, document: D) => Promise<SaveAnswer<D>>;
+	drafts: DraftStore<D>;
 	/** Milliseconds without a change before a save; the pause a typing person makes. */
 	delay?: number;
 	/** Milliseconds after which a failed save is tried again by itself. */
@@ -38,16 +38,16 @@ export interface AutoSaveOptions {
  * Saves a document by itself, one save at a time. What is not yet on the server is kept as a draft
  * in the browser from the moment it is written until it is saved.
  */
-export class AutoSave {
-	#status: SaveStatus;
+export class AutoSave<D = ShowDocument> {
+	#status: SaveStatus<D>;
 	#revision: number;
-	#saved: ShowDocument;
-	#wanted: ShowDocument;
+	#saved: D;
+	#wanted: D;
 	#running: Promise<void> | null = null;
 	#timer: ReturnType<typeof setTimeout> | undefined;
-	readonly #options: AutoSaveOptions;
+	readonly #options: AutoSaveOptions<D>;
 
-	constructor(options: AutoSaveOptions) {
+	constructor(options: AutoSaveOptions<D>) {
 		this.#options = options;
 		this.#saved = options.document;
 		this.#wanted = options.document;
@@ -55,7 +55,7 @@ export class AutoSave {
 		this.#status = $state.raw({ kind: 'saved', at: options.at });
 	}
 
-	get status(): SaveStatus {
+	get status(): SaveStatus<D> {
 		return this.#status;
 	}
 
@@ -69,7 +69,7 @@ export class AutoSave {
 	}
 
 	/** The document has changed: a draft at once, a save after the pause. */
-	schedule(document: ShowDocument): void {
+	schedule(document: D): void {
 		if (document === this.#wanted) return;
 		this.#wanted = document;
 		this.#keepDraft();
@@ -94,7 +94,7 @@ export class AutoSave {
 	}
 
 	/** Goes on from another revision, after a conflict is settled or a draft is brought back. */
-	rebase(revision: number, saved: ShowDocument, at: string): void {
+	rebase(revision: number, saved: D, at: string): void {
 		this.#revision = revision;
 		this.#saved = saved;
 		this.#wanted = saved;
@@ -103,7 +103,7 @@ export class AutoSave {
 	}
 
 	/** Takes a document as unsaved work that began from an older revision. */
-	resume(draft: Draft): void {
+	resume(draft: Draft<D>): void {
 		this.#revision = draft.baseRevision;
 		this.schedule(draft.document);
 	}

@@ -1,26 +1,31 @@
+import type { z } from 'zod';
 import { showDocumentSchema, type ShowDocument } from '$lib/show/document';
 
-/** Work on a show that the server has not taken yet. */
-export interface Draft {
+/** Work on a document that the server has not taken yet. */
+export interface Draft<D = ShowDocument> {
 	baseRevision: number;
-	document: ShowDocument;
+	document: D;
 }
 
-export interface KeptDraft extends Draft {
+export interface KeptDraft<D = ShowDocument> extends Draft<D> {
 	/** When it was last written; ISO 8601. */
 	at: string;
 }
 
-export interface DraftStore {
-	write(draft: Draft): void;
+export interface DraftStore<D = ShowDocument> {
+	write(draft: Draft<D>): void;
 	/** @returns null where there is none or it cannot be read */
-	read(): KeptDraft | null;
+	read(): KeptDraft<D> | null;
 	remove(): void;
 }
 
 /** Drafts of one show in the browser's own storage, which outlives the tab and the connection. */
-export function browserDrafts(showId: string, storage: Storage): DraftStore {
-	const key = `farwheel draft ${showId}`;
+export const browserDrafts = (showId: string, storage: Storage): DraftStore =>
+	draftsOf(showId, storage, showDocumentSchema);
+
+/** The same for a document of any kind. @param id of what is edited; ids are unique over all kinds */
+export function draftsOf<D>(id: string, storage: Storage, schema: z.ZodType<D>): DraftStore<D> {
+	const key = `farwheel draft ${id}`;
 	return {
 		write(draft) {
 			try {
@@ -34,7 +39,7 @@ export function browserDrafts(showId: string, storage: Storage): DraftStore {
 			const text = storage.getItem(key);
 			if (text === null) return null;
 			const draft = parse(text);
-			const document = showDocumentSchema.safeParse(draft?.document);
+			const document = schema.safeParse(draft?.document);
 			if (!document.success || typeof draft?.baseRevision !== 'number') return null;
 			return {
 				baseRevision: draft.baseRevision,

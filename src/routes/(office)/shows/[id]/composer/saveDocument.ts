@@ -3,18 +3,19 @@ import { showDocumentSchema, type ShowDocument } from '$lib/show/document';
 import { z } from 'zod';
 import type { Conflict } from './AutoSave.svelte';
 
-export type SaveAnswer =
+export type SaveAnswer<D = ShowDocument> =
 	| { kind: 'saved'; revision: number; at: string }
 	| { kind: 'failed'; why: string }
-	| { kind: 'conflict'; conflict: Conflict };
+	| { kind: 'conflict'; conflict: Conflict<D> };
 
 const savedSchema = z.object({ revision: z.number(), at: z.string() });
-const conflictSchema = z.object({
-	theirs: showDocumentSchema,
-	revision: z.number(),
-	by: z.string().nullable(),
-	at: z.string()
-});
+const conflictSchema = <D>(document: z.ZodType<D>) =>
+	z.object({
+		theirs: document,
+		revision: z.number(),
+		by: z.string().nullable(),
+		at: z.string()
+	});
 const problemSchema = z.object({ detail: z.string() });
 
 const json = (method: string, body: unknown): RequestInit => ({
@@ -46,15 +47,24 @@ async function reach(url: string, init: RequestInit): Promise<Response | null> {
 }
 
 /** Sends one save and says what became of it. */
-export async function saveDocument(
+export const saveDocument = (
 	showId: string,
 	baseRevision: number,
 	document: ShowDocument
-): Promise<SaveAnswer> {
-	const response = await reach(links.showDocument(showId), json('PUT', { baseRevision, document }));
+): Promise<SaveAnswer> =>
+	putDocument(links.showDocument(showId), baseRevision, document, showDocumentSchema);
+
+/** The same for a document of any kind. @param url takes {baseRevision, document} by PUT */
+export async function putDocument<D>(
+	url: string,
+	baseRevision: number,
+	document: D,
+	schema: z.ZodType<D>
+): Promise<SaveAnswer<D>> {
+	const response = await reach(url, json('PUT', { baseRevision, document }));
 	if (!response) return { kind: 'failed', why: whyOffline };
 	if (response.status === 409) {
-		const conflict = conflictSchema.safeParse(
+		const conflict = conflictSchema(schema).safeParse(
 			await response
 				.clone()
 				.json()
@@ -67,11 +77,17 @@ export async function saveDocument(
 }
 
 /** Keeps a document as a show of its own. @returns its id, or why not */
-export async function saveAsCopy(
+export const saveAsCopy = (
 	showId: string,
 	document: ShowDocument
+): Promise<{ id: string } | { why: string }> => postCopy(links.showDocument(showId), document);
+
+/** The same for a document of any kind. @param url takes {document} by POST */
+export async function postCopy(
+	url: string,
+	document: unknown
 ): Promise<{ id: string } | { why: string }> {
-	const response = await reach(links.showDocument(showId), json('POST', { document }));
+	const response = await reach(url, json('POST', { document }));
 	if (!response) return { why: whyOffline };
 	if (!response.ok || response.redirected) return { why: await whyNot(response) };
 	return z.object({ id: z.string() }).parse(await response.json());
