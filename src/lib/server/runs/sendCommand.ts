@@ -10,6 +10,12 @@ import { editionOf } from './editionOf';
 import { fitCommand } from './fitCommand';
 import { allEvents } from './runEvents';
 
+/**
+ * A command takes effect this long after it arrives, so that every screen has it before it is due
+ * and all change in the same tick. Small against the 100 ms in which a press must be seen.
+ */
+export const leadMs = 50;
+
 export const sentCommandSchema = z.strictObject({
 	command: runCommandSchema,
 	/** The sender's own key for this press; sent again with it, the command is applied once. */
@@ -56,7 +62,7 @@ export async function sendCommand(
 		if (run.endedAt) return { applied: false, number: run.lastEvent };
 		const { content } = await editionOf(tx, run.editionId);
 		const events = await allEvents(tx, runId);
-		const at = Math.max(Date.now(), events.at(-1)?.at ?? 0);
+		const at = Math.max(Date.now() + leadMs, events.at(-1)?.at ?? 0);
 		const kept = fitCommand(playbackAt(content, events, at), command);
 		if (!kept) return { applied: false, number: run.lastEvent };
 		const number = run.lastEvent + 1;
