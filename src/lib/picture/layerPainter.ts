@@ -10,9 +10,12 @@ import {
 	nearnessLight,
 	spotShare,
 	spriteRadius,
-	starGain,
 	tableSize
 } from './starLight';
+import { makeViewLight, setViewLight } from './viewLight';
+
+/** Filled anew for every layer; kept so that a frame allocates nothing. */
+const seen = makeViewLight();
 
 /** Light tables by look; made once, read in every frame. */
 const tablesOf = new WeakMap<object, Float32Array>();
@@ -47,7 +50,13 @@ export function paintLayer(
 	const scale = centre / rim;
 	const table = tables(layer);
 	const { arms } = look.spiral;
-	const gain = starGain(size, stars.count) * frame.exposure;
+	const { gains, leanX, leanY, faceZ, side, reach2, screen } = setViewLight(
+		camera,
+		frame,
+		layer,
+		size,
+		seen
+	);
 	const reference = (2 * look.outerRadius) ** 2;
 	const bySpeed = frame.colour === 'speed';
 	const lowest = half === 'right' ? centre : 1;
@@ -82,12 +91,18 @@ export function paintLayer(
 			const fy = centre + Y * k2;
 			if (fx < lowest || fx >= highest || fy < 1 || fy >= last) continue;
 			const index = lightIndex(armCos[i] * ac - armSin[i] * as, armSin[i] * ac + armCos[i] * as);
-			const L =
-				(gain *
-					light[i] *
-					nearnessLight(reference, across2 + Z * Z) *
-					table[population[i] * tableSize + index]) /
-				255;
+			const p = population[i];
+			let L =
+				gains[p] *
+				light[i] *
+				nearnessLight(reference, across2 + Z * Z) *
+				table[p * tableSize + index];
+			const depth = faceZ - gz;
+			if (depth * side > 0) {
+				const dx = gx + leanX * depth;
+				const dy = gy + leanY * depth;
+				if (dx * dx + dy * dy < reach2) L *= screen;
+			}
 			if (L < dimmestLight) continue;
 			const from = bySpeed ? speedRamp : colour;
 			const at = bySpeed ? speed : 3 * i;

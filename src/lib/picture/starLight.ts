@@ -79,3 +79,26 @@ export const dimmestLight = 0.004;
  */
 export const nearnessLight = (reference2: number, distance2: number): number =>
 	Math.min(4, reference2 / distance2);
+
+/**
+ * By population, the power with which a layer seen aslant is dimmed. Edge-on the light of a disc falls
+ * on few pixels and would only be white; real discs hide themselves there, round bulges do not.
+ */
+export const slantLight = [0.15, 0.7, 0.55, 0.3] as const;
+
+/** Share of the light where colour tells speed: hues must not run into white. */
+export const speedShare = 0.85;
+
+/**
+ * The thin sheet of dust in the plane, which dims what lies behind it: hardly anything face-on, a dark
+ * lane across the middle edge-on. Lengths in kpc, or as a share of the outer radius.
+ */
+export const dustScreen = {
+	halfHeight: 0.13,
+	reach: 0.55,
+	/** Optical depth straight through, at full dust. */
+	depth: 0.16,
+	/** Sine of the least angle between sheet and line of sight; it is never quite flat. */
+	leastSlope: 0.035,
+	leastLight: 0.1
+} as const;

@@ -27,6 +27,8 @@ const armsBegin = 0.075;
 /** One star in so many is a soft patch: the light of the many that no film can show singly. */
 const hazeEvery = 40;
 const hazeLight = 0.75;
+/** Share of the outer radius where haze ends, in discs and elsewhere: beyond, patches would stand alone. */
+const hazeEnds = { disc: 0.55, spheroid: 0.12 };
 
 /** H alpha and its neighbours as the eye would see them: common practice, no source. */
 const cloudColour: [number, number, number] = [255, 96, 150];
@@ -44,16 +46,16 @@ export function armPhase(look: GalaxyLook, R: number, azimuth: number): number {
  * Colours drawn away from grey, since a dim film washes them out: what long exposures show rather
  * than what the eye would see. Common practice, no source.
  */
-function deepened([r, g, b]: [number, number, number]): [number, number, number] {
+function deepened([r, g, b]: [number, number, number], depth: number): [number, number, number] {
 	const grey = (r + g + b) / 3;
-	const away = (c: number) => Math.round(Math.min(255, Math.max(0, grey + (c - grey) * 1.7)));
+	const away = (c: number) => Math.round(Math.min(255, Math.max(0, grey + (c - grey) * depth)));
 	return [away(r), away(g), away(b)];
 }
 
 /** Eighty colours about a temperature, so that no star needs its own spectrum. */
-function palette(temperature: number, spread: number): [number, number, number][] {
+function palette(temperature: number, spread: number, depth = 1.7): [number, number, number][] {
 	return Array.from({ length: 80 }, (_, i) =>
-		deepened(temperatureColour(temperature * (1 + spread * (i / 40 - 1))))
+		deepened(temperatureColour(temperature * (1 + spread * (i / 40 - 1))), depth)
 	);
 }
 
@@ -98,7 +100,7 @@ export function sampleStars(
 	const colours: Record<Exclude<Population, 'gas-cloud'>, [number, number, number][]> = {
 		bulge: palette(look.bulgeTemperature, 0.22),
 		disc: palette(look.discTemperature, 0.25),
-		arm: palette(look.armTemperature, 0.35)
+		arm: palette(look.armTemperature, 0.35, 2.3)
 	};
 	const discs = profiles.map((p, i) => ({ p, i })).filter(({ p }) => p.disc);
 	const placeInDisc = discs.length
@@ -138,7 +140,8 @@ export function sampleStars(
 		const phase = armPhase(look, R, azimuth);
 		// Few stars are bright: light falls off as a power of rank, cut at both ends.
 		const rank = random.next();
-		const haze = !cloud && i % hazeEvery === 0;
+		const hazeEnd = (profile.disc ? hazeEnds.disc : hazeEnds.spheroid) * look.outerRadius;
+		const haze = !cloud && i % hazeEvery === 0 && r < hazeEnd;
 		const light = cloud
 			? 1.6 + 2.4 * rank
 			: haze
@@ -150,7 +153,7 @@ export function sampleStars(
 			y: R * Math.sin(azimuth),
 			z,
 			armPhase: phase,
-			light: population === 'arm' ? light * 1.25 : light,
+			light: population === 'arm' ? light * 1.5 : light,
 			colour:
 				population === 'gas-cloud'
 					? cloudColour

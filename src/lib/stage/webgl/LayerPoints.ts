@@ -10,6 +10,7 @@ import {
 	RedFormat,
 	RGBAFormat,
 	UnsignedByteType,
+	Vector2,
 	Vector3,
 	type BufferGeometry
 } from 'three';
@@ -21,9 +22,9 @@ import {
 	lightTables,
 	spotShare,
 	spriteRadius,
-	starGain,
 	tableSize
 } from '$lib/picture/starLight';
+import { makeViewLight, setViewLight } from '$lib/picture/viewLight';
 import { populations, type GalaxyLook } from '$lib/starfield/types';
 import fragmentShader from './stars.frag.glsl?raw';
 import vertexShader from './stars.vert.glsl?raw';
@@ -45,6 +46,7 @@ export class LayerPoints {
 	readonly #rings: Float32Array;
 	readonly #ringTexture: DataTexture;
 	readonly #ramp = rampTexture();
+	readonly #light = makeViewLight();
 	#lightTexture: DataTexture | null = null;
 	#look: GalaxyLook | null = null;
 
@@ -69,7 +71,12 @@ export class LayerPoints {
 				cameraShift: { value: new Vector3() },
 				rim: { value: 1 },
 				filmSize: { value: 1 },
-				gain: { value: 1 },
+				gains: { value: this.#light.gains },
+				lean: { value: new Vector2() },
+				faceZ: { value: 0 },
+				side: { value: 1 },
+				reach2: { value: 0 },
+				screen: { value: 1 },
 				reference2: { value: 1 },
 				spriteScale: { value: 1 },
 				dimmest: { value: dimmestLight },
@@ -91,7 +98,12 @@ export class LayerPoints {
 		uniforms.cameraShift.value.set(camera.shift[0], camera.shift[1], camera.shift[2]);
 		uniforms.rim.value = camera.rim;
 		uniforms.filmSize.value = filmSize;
-		uniforms.gain.value = starGain(filmSize, layer.stars.count) * frame.exposure;
+		const light = setViewLight(camera, frame, layer, filmSize, this.#light);
+		uniforms.lean.value.set(light.leanX, light.leanY);
+		uniforms.faceZ.value = light.faceZ;
+		uniforms.side.value = light.side;
+		uniforms.reach2.value = light.reach2;
+		uniforms.screen.value = light.screen;
 		uniforms.reference2.value = (2 * layer.look.outerRadius) ** 2;
 		uniforms.spriteScale.value = spriteRadius(1000, filmSize) / 1000;
 		uniforms.bySpeed.value = frame.colour === 'speed';

@@ -19,7 +19,13 @@ uniform mat3 cameraMatrix;
 uniform vec3 cameraShift;
 uniform float rim;
 uniform float filmSize;
-uniform float gain;
+// picture/viewLight.ts: light by population, and what lies behind the dust.
+uniform float gains[4];
+uniform vec2 lean;
+uniform float faceZ;
+uniform float side;
+uniform float reach2;
+uniform float screen;
 uniform float reference2;
 uniform float spriteScale;
 uniform float dimmest;
@@ -59,7 +65,10 @@ void main() {
 	float sine = arm.y * turn.z + arm.x * turn.w;
 	int index = min(127, int((cosine + 1.0) * 64.0)) + (sine < 0.0 ? 128 : 0);
 	float wave = texelFetch(lightTable, ivec2(index, int(population)), 0).r;
-	float L = gain * light * min(4.0, reference2 / dot(seen, seen)) * wave / 255.0;
+	float L = gains[int(population)] * light * min(4.0, reference2 / dot(seen, seen)) * wave;
+	float depth = faceZ - place.z;
+	vec2 crossing = place.xy + lean * depth;
+	if (depth * side > 0.0 && dot(crossing, crossing) < reach2) L *= screen;
 	if (L < dimmest) return;
 
 	radius = max(1.0, size * spriteScale);
