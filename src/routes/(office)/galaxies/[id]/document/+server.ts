@@ -1,0 +1,38 @@
+import { json } from '@sveltejs/kit';
+import { AppError } from '$lib/server/errors';
+import { copyGalaxy, saveGalaxy } from '$lib/server/galaxies';
+import { answering } from '$lib/server/http/problem';
+import { contextOf } from '../../../shows/contextOf';
+import { readJson } from '../../../shows/[id]/readJson';
+import type { RequestHandler } from './$types';
+
+const limit = {
+	bytes: 256 * 1024,
+	words: 'A galaxy may have at most 256 kB. Nothing was saved.'
+};
+
+const only = (body: Record<string, unknown>, known: string[]) => {
+	const [odd] = Object.keys(body).filter((key) => !known.includes(key));
+	if (odd === undefined) return;
+	const issues = [{ path: odd, message: 'There is no such field here.' }];
+	throw new AppError('invalid', `Nothing was saved: there is no field “${odd}” here.`, { issues });
+};
+
+/** Saves: {baseRevision, document} → {revision, at}; 409 carries theirs, revision, by and at. */
+export const PUT: RequestHandler = ({ locals, params, request }) =>
+	answering(async () => {
+		const body = await readJson(request, limit);
+		only(body, ['baseRevision', 'document']);
+		const { baseRevision, document } = body;
+		return json(await saveGalaxy(contextOf(locals), { id: params.id, baseRevision, document }));
+	});
+
+/** Keeps a version as a galaxy of its own: {document} → 201 {id}. */
+export const POST: RequestHandler = ({ locals, params, request }) =>
+	answering(async () => {
+		const body = await readJson(request, limit);
+		only(body, ['document']);
+		const document = body.document ?? null;
+		const id = await copyGalaxy(contextOf(locals), { id: params.id, document });
+		return json({ id }, { status: 201 });
+	});
