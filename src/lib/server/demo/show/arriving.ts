@@ -7,7 +7,7 @@ export function arriving({ wheel }: DemoGalaxyIds): SceneDraft[] {
 	return [
 		{
 			title: 'Doors',
-			seconds: 105,
+			seconds: 95,
 			subject: { kind: 'dark', name: 'The weight of the Wheel' },
 			motion: { rate: 0, begin: 'fresh' },
 			entrance: { kind: 'fade', seconds: 3 },

@@ -82,7 +82,7 @@ that pulls and does not shine.`
 		},
 		{
 			title: 'What the halo adds',
-			seconds: 165,
+			seconds: 155,
 			subject: galaxy,
 			motion: { rate: 4 },
 			view: { distance: 42, inclination: 45, turn: -20, centreAltitude: 58 },

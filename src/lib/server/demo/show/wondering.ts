@@ -59,7 +59,7 @@ smaller part. The bright Wheel is the foam on a dark wave.`
 		},
 		{
 			title: 'Small and large',
-			seconds: 125,
+			seconds: 115,
 			subject: { kind: 'galaxy', galaxyId: dwarf },
 			motion: { rate: 5, begin: 'fresh' },
 			view: { distance: 14, inclination: 48, turn: 10, centreAltitude: 58 },
@@ -80,7 +80,7 @@ want to learn what the dark stuff is like, because there is so little light in t
 		},
 		{
 			title: 'What we do not know',
-			seconds: 120,
+			seconds: 110,
 			subject: { kind: 'galaxy', galaxyId: orchard },
 			motion: { rate: 2, begin: 'fresh' },
 			view: { distance: 34, inclination: 55, turn: 25, centreAltitude: 50 },
