@@ -39,7 +39,8 @@ export function launchApp({ root, dev, env, port, host, plainLog }) {
 	// Detached: a Ctrl-C in the terminal reaches us alone, and we stop things in their order.
 	const child = spawn(process.execPath, args, {
 		cwd: root,
-		env,
+		// Above the limits of the app's own pages, so that they can answer 413 in their own words.
+		env: { BODY_SIZE_LIMIT: '2M', ...env },
 		detached: true,
 		stdio: ['ignore', 'pipe', 'pipe']
 	});
