@@ -169,8 +169,9 @@ test('a show runs on a paired screen from a console, live, through a reload, to 
 	await expect(stage).toHaveAttribute('data-status', 'ended');
 
 	await desk.getByRole('link', { name: 'Write the log' }).click();
-	await expect(desk.getByText('What the halo adds')).toBeVisible();
-	await expect(desk.getByText(/^Halo set to /).first()).toBeVisible();
+	await expect(desk.getByRole('heading', { level: 1, name: /^Run of / })).toBeVisible();
+	await expect(desk.getByRole('cell', { name: /What the halo adds/ })).toBeVisible();
+	await expect(desk.getByRole('cell', { name: /^Halo set to / }).first()).toBeVisible();
 	await desk.getByLabel('Head-count').fill('57');
 	await desk.getByLabel('Remarks').fill('One late coach.');
 	await desk.getByRole('button', { name: 'Save the log' }).click();
