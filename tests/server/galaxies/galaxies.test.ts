@@ -89,7 +89,7 @@ describe('galaxies', () => {
 		expect(await names({ search: '0%' })).toEqual(['Ash 100%']);
 		expect(await names({ search: '0_' })).toEqual([]);
 		const [row] = await listGalaxies(ctx, all);
-		expect(row).toMatchObject({ litCount: 3, unlitCount: 1, showCount: 1 });
+		expect(row).toMatchObject({ litCount: 3, unlitCount: 1, usedBy: ['One show'] });
 		expect(row.peakSpeed).toBeGreaterThan(180);
 		expect(row.peakSpeed).toBeLessThan(280);
 		expect(row.outerSpeed).toBeLessThanOrEqual(row.peakSpeed);

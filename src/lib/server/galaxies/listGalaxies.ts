@@ -21,8 +21,8 @@ export interface GalaxyListed extends SpeedSummary {
 	updatedAt: Date;
 	updatedByName: string | null;
 	archivedAt: Date | null;
-	/** Shows of the venue, not archived, that use it. */
-	showCount: number;
+	/** Titles of the shows of the venue, not archived, that use it. */
+	usedBy: string[];
 }
 
 const keys = {
@@ -30,7 +30,7 @@ const keys = {
 	peak: (row: GalaxyListed) => row.peakSpeed,
 	outer: (row: GalaxyListed) => row.outerSpeed,
 	changed: (row: GalaxyListed) => row.updatedAt.getTime(),
-	shows: (row: GalaxyListed) => row.showCount
+	shows: (row: GalaxyListed) => row.usedBy.length
 };
 
 /** What LIKE reads as a sign stands for itself. */
@@ -47,7 +47,9 @@ export async function listGalaxies(ctx: Context, filter: GalaxyFilter): Promise<
 			updatedAt: galaxies.updatedAt,
 			updatedByName: users.name,
 			archivedAt: galaxies.archivedAt,
-			showCount: sql<number>`(select count(*)::int from ${shows} s where s.venue_id = ${galaxies.venueId} and s.archived_at is null and s.document -> 'scenes' @> jsonb_build_array(jsonb_build_object('subject', jsonb_build_object('kind', 'galaxy', 'galaxyId', ${galaxies.id}::text))))`
+			usedBy: sql<
+				string[]
+			>`array(select s.title from ${shows} s where s.venue_id = ${galaxies.venueId} and s.archived_at is null and s.document -> 'scenes' @> jsonb_build_array(jsonb_build_object('subject', jsonb_build_object('kind', 'galaxy', 'galaxyId', ${galaxies.id}::text))) order by s.title)`
 		})
 		.from(galaxies)
 		.leftJoin(users, eq(users.id, galaxies.updatedBy))

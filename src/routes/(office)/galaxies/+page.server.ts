@@ -3,19 +3,18 @@ import { links } from '$lib/links';
 import { isAppError } from '$lib/server/errors';
 import {
 	archiveGalaxy,
-	copyFromShelf,
 	copyGalaxy,
 	createGalaxy,
 	galaxyFilterSchema,
 	listGalaxies,
 	restoreGalaxy,
 	shelf,
-	startingShapes,
-	type GalaxyIssue
+	speedSummary,
+	startingShapes
 } from '$lib/server/galaxies';
 import { orError } from '$lib/server/http/problem';
 import { may } from '$lib/server/permissions';
-import { contextOf } from '../shows/contextOf';
+import { contextOf } from './contextOf';
 import type { Actions, PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async ({ locals, url }) => {
@@ -24,15 +23,15 @@ export const load: PageServerLoad = async ({ locals, url }) => {
 	const mayEdit = may(ctx.roles, 'galaxy.edit');
 	return {
 		filter,
+		making: mayEdit && url.searchParams.has('new'),
 		galaxies: await orError(listGalaxies(ctx, filter)),
-		shelf: shelf().map(({ id, document, sources, approximations }) => ({
+		shapes: startingShapes.map(({ id, label, help }) => ({ id, label, help })),
+		shelf: shelf().map(({ id, document, sources }) => ({
 			id,
 			name: document.name,
-			sources,
-			approximations
+			source: sources[0],
+			...speedSummary(document)
 		})),
-		shapes: startingShapes.map(({ id, label, help }) => ({ id, label, help })),
-		making: mayEdit && url.searchParams.has('new'),
 		mayEdit,
 		timeZone: ctx.timeZone
 	};
@@ -50,18 +49,13 @@ export const actions: Actions = {
 			id = await createGalaxy(contextOf(locals), { name, shape });
 		} catch (thrown) {
 			if (!isAppError(thrown) || thrown.code !== 'invalid') return orError(Promise.reject(thrown));
-			const [issue] = thrown.details.issues as GalaxyIssue[];
+			const [issue] = thrown.details.issues as { message: string }[];
 			return fail(400, { name, shape, problem: issue.message });
 		}
 		redirect(303, links.galaxy(id));
 	},
 	copy: async ({ locals, request }) => {
 		const id = await orError(copyGalaxy(contextOf(locals), { id: await idOf(request) }));
-		redirect(303, links.galaxy(id));
-	},
-	copyShelf: async ({ locals, request }) => {
-		const ctx = contextOf(locals);
-		const id = await orError(copyFromShelf(ctx, { shelfId: await idOf(request) }));
 		redirect(303, links.galaxy(id));
 	},
 	archive: async ({ locals, request }) => ({

@@ -1,7 +1,7 @@
 import { readGalaxy } from '$lib/server/galaxies';
 import { orError } from '$lib/server/http/problem';
 import { may } from '$lib/server/permissions';
-import { contextOf } from '../../shows/contextOf';
+import { contextOf } from '../contextOf';
 import type { PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async ({ locals, params }) => {
@@ -19,6 +19,7 @@ export const load: PageServerLoad = async ({ locals, params }) => {
 			usedBy: galaxy.usedBy
 		},
 		mayEdit: may(ctx.roles, 'galaxy.edit') && !archived,
+		mayCopy: may(ctx.roles, 'galaxy.edit'),
 		timeZone: ctx.timeZone
 	};
 };

@@ -2,10 +2,11 @@ import { json } from '@sveltejs/kit';
 import { AppError } from '$lib/server/errors';
 import { copyGalaxy, saveGalaxy } from '$lib/server/galaxies';
 import { answering } from '$lib/server/http/problem';
-import { contextOf } from '../../../shows/contextOf';
 import { readJson } from '../../../shows/[id]/readJson';
+import { contextOf } from '../../contextOf';
 import type { RequestHandler } from './$types';
 
+/** Largest galaxy taken; 32 components with long sources fit many times over. */
 const limit = {
 	bytes: 256 * 1024,
 	words: 'A galaxy may have at most 256 kB. Nothing was saved.'
