@@ -10,7 +10,7 @@ describe('drawingsLayout', () => {
 		[2048, false],
 		[4096, true]
 	])('keeps everything on a film of %d inside the safe band', (filmSize, withChart) => {
-		const { chart, caption, name, scale, halves } = drawingsLayout(filmSize, withChart);
+		const { chart, caption, name, scale, halves, title } = drawingsLayout(filmSize, withChart);
 		const corners = [chart, scale].flatMap(({ left, right, foot, head }) => [
 			{ azimuth: left, altitude: foot },
 			{ azimuth: right, altitude: head }
@@ -18,6 +18,7 @@ describe('drawingsLayout', () => {
 		const places = [
 			...corners,
 			name,
+			title,
 			{ altitude: caption.altitude, azimuth: caption.azimuth - caption.widest / 2 },
 			{ altitude: caption.altitude, azimuth: caption.azimuth + caption.widest / 2 },
 			{ ...halves, azimuth: -halves.azimuth },

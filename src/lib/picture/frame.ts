@@ -67,6 +67,8 @@ export interface Drawings {
 	};
 	rings: { radius: number; label: string }[];
 	name?: string;
+	/** Large, alone in front: what a dark scene is called. */
+	title?: string;
 	caption?: string;
 	/** Colour scale for stars coloured by speed, km/s. */
 	scale?: [number, number];

@@ -23,10 +23,10 @@ export function sceneDrawings(
 ): Drawings {
 	const { drawings } = scene;
 	if (!galaxy) {
-		const name = scene.subject.kind === 'dark' ? scene.subject.name : '';
+		const title = scene.subject.kind === 'dark' ? scene.subject.name : '';
 		return {
 			rings: [],
-			...(name ? { name } : {}),
+			...(title ? { title } : {}),
 			...(drawings.caption
 				? { caption: filledText(drawings.caption, { model: null, measured: [], outerRadius: 1 }) }
 				: {})

@@ -90,7 +90,7 @@ export function drawOnFilm(
 	context.setTransform(1, 0, 0, 1, 0, 0);
 	context.clearRect(0, 0, filmSize, filmSize);
 	const pen = new FilmPen(context, filmSize, geometry);
-	const { letter, chart, caption, name, halves } = drawingsLayout(
+	const { letter, chart, caption, name, halves, title } = drawingsLayout(
 		filmSize,
 		drawings.chart !== undefined
 	);
@@ -104,6 +104,9 @@ export function drawOnFilm(
 			align: 'right',
 			bold: true
 		});
+	}
+	if (drawings.title) {
+		pen.text(drawings.title, title, { height: letter * 1.6, colour: inks.ink, bold: true });
 	}
 	if (drawings.halves) {
 		drawings.halves.forEach((label, i) => {

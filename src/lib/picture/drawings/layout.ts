@@ -11,7 +11,7 @@ export interface Field {
 
 /**
  * Where things stand, all inside the safe band: the chart low on the left, names low on the right, the
- * caption lowest in the middle, or right of the chart, names of the halves high.
+ * caption lowest in the middle, or right of the chart, names of the halves above it.
  */
 export function drawingsLayout(filmSize: number, withChart: boolean) {
 	const letter = letterHeight(filmSize);
@@ -24,7 +24,8 @@ export function drawingsLayout(filmSize: number, withChart: boolean) {
 			: { altitude: safeBand.lowest + 0.8, azimuth: 0, widest: 62, lines: 2 },
 		name: { altitude: 18, azimuth: safeBand.azimuth - 3 },
 		scale: { left: 14, right: safeBand.azimuth - 5, foot: 23.2, head: 24.2 } satisfies Field,
-		halves: { altitude: safeBand.highest - 3, azimuth: 24 }
+		halves: { altitude: 16.5, azimuth: 24 },
+		title: { altitude: 33, azimuth: 0 }
 	};
 }
 
