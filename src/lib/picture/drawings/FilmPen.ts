@@ -16,6 +16,7 @@ export type FilmContext = Pick<
 	| 'arc'
 	| 'setTransform'
 	| 'fillText'
+	| 'strokeText'
 	| 'measureText'
 	| 'setLineDash'
 	| 'clearRect'
@@ -139,18 +140,30 @@ export class FilmPen {
 		context.fillStyle = style.colour;
 		context.textAlign = 'left';
 		context.textBaseline = 'alphabetic';
-		let before = 0;
-		for (let i = 0; i < text.length; i++) {
-			const upTo = context.measureText(text.slice(0, i + 1)).width / this.perDegree;
-			const middle = start + (before + upTo) / 2;
-			this.#glyph(text[i], at.altitude, at.azimuth + middle / level, (upTo - before) / 2);
-			before = upTo;
+		context.strokeStyle = inks.ground;
+		context.lineWidth = style.height * 0.3 * this.perDegree;
+		context.lineJoin = 'round';
+		// A dark rim under all letters first, so that words can be read over stars.
+		for (const how of ['strokeText', 'fillText'] as const) {
+			let before = 0;
+			for (let i = 0; i < text.length; i++) {
+				const upTo = context.measureText(text.slice(0, i + 1)).width / this.perDegree;
+				const middle = start + (before + upTo) / 2;
+				this.#glyph(how, text[i], at.altitude, at.azimuth + middle / level, (upTo - before) / 2);
+				before = upTo;
+			}
 		}
 		context.restore();
 	}
 
 	/** One letter, its middle at the azimuth, in the frame of the dome at that place. */
-	#glyph(letter: string, altitude: number, azimuth: number, halfWidth: number): void {
+	#glyph(
+		how: 'strokeText' | 'fillText',
+		letter: string,
+		altitude: number,
+		azimuth: number,
+		halfWidth: number
+	): void {
 		const { x, y } = this.place({ altitude, azimuth });
 		const step = 0.05;
 		const up = this.place({ altitude: altitude + step, azimuth });
@@ -161,6 +174,6 @@ export class FilmPen {
 		const rx = (side.x - x) / step / this.perDegree;
 		const ry = (side.y - y) / step / this.perDegree;
 		this.context.setTransform(rx, ry, -ux, -uy, x, y);
-		this.context.fillText(letter, -halfWidth * this.perDegree, 0);
+		this.context[how](letter, -halfWidth * this.perDegree, 0);
 	}
 }
