@@ -50,13 +50,15 @@ const referenceCount = 100_000;
 const starBrightness = 145;
 
 /**
- * Brightness of a star of light 1: fewer stars on a larger film must each give more, so that the
- * galaxy keeps its surface brightness. Kept within what eight bits can show.
+ * Brightness of a star of light 1. Few stars on a large film must each give more and many on a small
+ * one less, so that the galaxy keeps its surface brightness; not in full where they are few, since
+ * single stars would glare. Kept within what eight bits can show.
  * @param filmSize pixels across @param count stars of the galaxy
  */
 export function starGain(filmSize: number, count: number): number {
 	const spread = (filmSize / referenceFilm) ** 2 * (referenceCount / Math.max(1, count));
-	return starBrightness * Math.min(2.4, Math.max(0.55, spread ** 0.6));
+	const share = spread < 1 ? Math.max(0.12, spread ** 0.85) : Math.min(2.4, spread ** 0.6);
+	return starBrightness * share;
 }
 
 /** Radius in pixels of a sprite of size 1 is one; larger ones grow with the film. */
