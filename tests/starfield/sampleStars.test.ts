@@ -52,6 +52,15 @@ describe('sampleStars', () => {
 		for (const count of counts) expect(count).toBeGreaterThan(0);
 		expect(counts[3]).toBe(initialLook.gasClouds);
 	});
+	it('gives a galaxy without a bulge no bulge stars, and fades at the rim', () => {
+		const discOnly = { components: galaxy.model.components.filter((c) => c.id === 'disc') };
+		const flat = sampleStars(discOnly, initialLook, { count: 4000, seed: 5 });
+		expect(flat.population.includes(populations.indexOf('bulge'))).toBe(false);
+		const { outerRadius } = initialLook;
+		const between = (from: number, to: number) =>
+			indices.filter((i) => radius(i) > from * outerRadius && radius(i) < to * outerRadius).length;
+		expect(between(0.95, 1)).toBeLessThan(between(0.85, 0.9) / 1.5);
+	});
 	it('follows lit matter only', () => {
 		const dark = { components: galaxy.model.components.filter((c) => !c.lit) };
 		expect(() => sampleStars(dark, initialLook, { count: 10, seed: 1 })).toThrow('lit component');

@@ -21,7 +21,7 @@ const youngHeight = 0.09;
 const youngShare = 0.34;
 /** Bulges look a little flattened. */
 const bulgeFlattening = 0.72;
-/** Inside this share of the outer radius there are no arms. */
+/** Inside this share of the outer radius a galaxy with a bulge has no arms. */
 const armsBegin = 0.075;
 
 /** One star in so many is a soft patch: the light of the many that no film can show singly. */
@@ -103,6 +103,7 @@ export function sampleStars(
 		arm: palette(look.armTemperature, 0.35, 2.3)
 	};
 	const discs = profiles.map((p, i) => ({ p, i })).filter(({ p }) => p.disc);
+	const hasBulge = discs.length < profiles.length;
 	const placeInDisc = discs.length
 		? placer(
 				discs.map(({ p }) => p),
@@ -130,7 +131,7 @@ export function sampleStars(
 				random,
 				cloud || population === 'arm' ? youngHeight : profile.scaleHeight || oldHeight
 			);
-			if (!cloud && R < armsBegin * look.outerRadius) population = 'bulge';
+			if (!cloud && hasBulge && R < armsBegin * look.outerRadius) population = 'bulge';
 		} else {
 			population = 'bulge';
 			const cosine = 2 * random.next() - 1;

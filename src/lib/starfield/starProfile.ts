@@ -16,6 +16,8 @@ const crowdingRadius = 0.32;
 const crowdedAt = 0.4;
 /** How strongly crowded rings are thinned: 0 not at all, 1 to one common brightness. */
 const thinning = 0.93;
+/** Share of the outer radius from which stars thin out, so that the disc has no rim. */
+const fadesFrom = 0.6;
 
 /**
  * Shares of stars by component and ring: mass, thinned where it is so dense that the film would
@@ -53,7 +55,8 @@ export function starProfiles(spec: MassModelSpec, radii: Float64Array): Componen
 	let total = 0;
 	for (let k = 0; k < count; k++) {
 		const crowded = mass(k) / area(k) / common;
-		const keep = 1 / (1 + crowded) ** thinning;
+		const outward = Math.max(0, (radii[k] / radii[count - 1] - fadesFrom) / (1 - fadesFrom));
+		const keep = (1 - outward * outward) / (1 + crowded) ** thinning;
 		for (const profile of profiles) {
 			profile.weights[k] *= keep;
 			total += profile.weights[k];
