@@ -11,6 +11,8 @@ export interface GalaxyPictureOptions {
 	seed: number;
 	starCount: number;
 	ringCount?: number;
+	/** Light against that on a dome; above 1 where the film shows a narrow part of the sky. 1 where missing. */
+	exposure?: number;
 }
 
 const backgroundStars = 600;
@@ -102,7 +104,7 @@ export class GalaxyPicture {
 			background: this.#background,
 			colour,
 			speedRange: this.#speedRange,
-			exposure: 1
+			exposure: this.#options.exposure ?? 1
 		};
 	}
 

@@ -25,3 +25,24 @@ export function ringPath(R: number, view: View, geometry: DomeGeometry): string 
 	});
 	return `M${points.join('L')}Z`;
 }
+
+/**
+ * The radius in the disc that is seen at a point of the film.
+ * @param u and @param v on the film's square of −1…1, right and down
+ * @returns kpc; null where the line of sight does not meet the disc's plane
+ */
+export function radiusAt(u: number, v: number, view: View, geometry: DomeGeometry): number | null {
+	camera.set(view, geometry);
+	const { matrix: m, shift: s, rim } = camera;
+	const across = Math.hypot(u, v);
+	if (across > 1) return null;
+	const theta = across * rim;
+	const side = across === 0 ? 0 : Math.sin(theta) / across;
+	const d = [u * side, v * side, Math.cos(theta)];
+	// Columns of the matrix take the eye's frame back to the galaxy's; the plane is z = 0 there.
+	const toward = (column: number, w: ArrayLike<number>) =>
+		m[column] * w[0] + m[3 + column] * w[1] + m[6 + column] * w[2];
+	const distance = toward(2, s) / toward(2, d);
+	if (!(distance > 0 && Number.isFinite(distance))) return null;
+	return Math.hypot(distance * toward(0, d) - toward(0, s), distance * toward(1, d) - toward(1, s));
+}
