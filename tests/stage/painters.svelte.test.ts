@@ -130,11 +130,17 @@ describe('WebglStarPainter', () => {
 
 describe('choosePainter', () => {
 	it('measures both and keeps the faster, with the reason', () => {
+		sessionStorage.clear();
 		const choice = choosePainter('auto', 256);
 		const { plainMs, webglMs } = choice;
 		if (plainMs === null || webglMs === null) throw new Error('nothing was measured');
 		expect(choice.painter).toBe(webglMs < plainMs ? 'webgl' : 'plain');
 		expect(choice.reason).toContain('ms a frame');
+	});
+	it('does not measure again in the same tab, so that a reload is quick', () => {
+		sessionStorage.clear();
+		const first = choosePainter('auto', 256);
+		expect(choosePainter('auto', 256)).toEqual(first);
 	});
 	it('keeps to what the dome sets', () => {
 		expect(choosePainter('plain', 256)).toMatchObject({ painter: 'plain', plainMs: null });

@@ -108,16 +108,28 @@ export function choosePainter(wanted: 'auto' | 'plain' | 'webgl', film: number):
 	if (!hasWebgl())
 		return choice('plain', 'This browser has no WebGL, so the plain painter is used.');
 	if (wanted === 'webgl') return choice('webgl', 'The WebGL painter is set for this dome.');
+	const remembered = recall(film);
+	if (remembered) return remembered;
 	const frame = trialFrame();
 	const plainMs = timePlain(film, frame);
 	const webglMs = timeWebgl(film, frame);
 	const painter = webglMs < plainMs ? 'webgl' : 'plain';
 	const [faster, slower] = painter === 'webgl' ? [webglMs, plainMs] : [plainMs, webglMs];
 	const name = painter === 'webgl' ? 'WebGL' : 'plain';
-	return {
+	const made: PainterChoice = {
 		painter,
 		reason: `The ${name} painter was faster here: ${milliseconds(faster)} a frame against ${milliseconds(slower)}.`,
 		plainMs,
 		webglMs
 	};
+	sessionStorage.setItem(memoryKey(film), JSON.stringify(made));
+	return made;
+}
+
+const memoryKey = (film: number) => `farwheel painter ${film}`;
+
+/** What this tab measured before: a page that is reloaded in the middle of a show must not wait. */
+function recall(film: number): PainterChoice | null {
+	const kept = sessionStorage.getItem(memoryKey(film));
+	return kept ? (JSON.parse(kept) as PainterChoice) : null;
 }

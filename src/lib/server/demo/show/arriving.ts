@@ -75,7 +75,7 @@ years. In all of human history, nobody could have seen it stir.`
 			view: { distance: 36, inclination: 40, turn: -20, centreAltitude: 54 },
 			drawings: { rings: [9.2], scale: true },
 			entrance: { kind: 'fade', seconds: 6 },
-			controls: [{ label: 'Years a second', target: { kind: 'rate' }, min: 0, max: 8, rest: 3 }],
+			controls: [{ label: 'Passing time', target: { kind: 'rate' }, min: 0, max: 8, rest: 3 }],
 			note: 'Let the ring be found before you give the number. The slider slows or stops the Wheel.',
 			script: `
 Now every star is painted by its speed. Blue is slow, yellow is fast. The marks along the bottom say

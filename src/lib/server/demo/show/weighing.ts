@@ -90,7 +90,7 @@ that pulls and does not shine.`
 			entrance: { kind: 'fade', seconds: 6 },
 			controls: [
 				{ label: 'Halo', target: { kind: 'halo-factor' }, min: 0, max: 2, rest: 1 },
-				{ label: 'Years a second', target: { kind: 'rate' }, min: 0, max: 8, rest: 4 }
+				{ label: 'Passing time', target: { kind: 'rate' }, min: 0, max: 8, rest: 4 }
 			],
 			note: 'Begin with the halo at none, raise it slowly to once, and stop where the line meets the points. If someone asks “what if there were twice as much?”, show it.',
 			script: `
