@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { massModel } from '../../src/lib/dynamics';
+import { massBreakdown, massModel } from '../../src/lib/dynamics';
+import { demoGalaxies } from '../../src/lib/server/demo/galaxies';
 import { G, myrFromTime } from '../../src/lib/units';
 import { galaxy } from '../show/support/content';
 import { readOuts, scientific } from '../../src/routes/(office)/galaxies/tuning/readOuts';
@@ -26,6 +27,17 @@ describe('readOuts', () => {
 		expect(out.lit.words).toBe('100 billion Suns');
 		expect(out.unlit.words).toBe('nothing');
 		expect(out.dynamical).toMatchObject({ exact: '1.000 × 10¹¹ Msun', label: 'Dynamical mass' });
+	});
+
+	it('say what the model says, each mass under its own label', () => {
+		const { model } = demoGalaxies.wheel.document;
+		const { speed, ratio, dynamical, lit, unlit } = read(model.components, 9.2);
+		expect(speed.exact).toBe(`${massModel(model).circularVelocity(9.2).toFixed(2)} km/s`);
+		expect(ratio.exact).toBe(massBreakdown(massModel(model), 9.2).ratio.toFixed(3));
+		expect(lit.exact).toBe('2.720 × 10¹⁰ Msun');
+		expect(unlit.exact).toBe('5.779 × 10¹⁰ Msun');
+		expect(dynamical.exact).toBe('9.168 × 10¹⁰ Msun');
+		expect(dynamical.note).toContain('Not the sum');
 	});
 
 	it('says that nothing escapes where the halo has no end', () => {
