@@ -3,6 +3,8 @@ import { beforeAll, describe, expect, test } from 'vitest';
 import { waitAfter } from '../../../src/lib/server/auth/limits';
 import { hashPassword, verifyPassword } from '../../../src/lib/server/auth/passwordHash';
 import { readSession } from '../../../src/lib/server/auth/readSession';
+import { sessionCookie } from '../../../src/lib/server/auth/sessionRules';
+import { listSessions } from '../../../src/lib/server/auth/sessions';
 import { signInWithPassword } from '../../../src/lib/server/auth/signIn';
 import { passwords, sessions, users } from '../../../src/lib/server/db/schema';
 import { changePassword, endOtherSessions, endOwnSession } from '../../../src/lib/server/people';
@@ -177,9 +179,9 @@ describe('one’s own account', () => {
 	});
 });
 
-describe('readSession', () => {
-	const hoursAgo = (hours: number) => new Date(Date.now() - hours * 3_600_000);
+const hoursAgo = (hours: number) => new Date(Date.now() - hours * 3_600_000);
 
+describe('readSession', () => {
 	test('is null after 30 days, after 12 idle hours, and for an unknown token', async () => {
 		const { email } = await newPerson();
 		const { token } = await signIn(email);
@@ -203,5 +205,34 @@ describe('readSession', () => {
 			.where(mine);
 		expect(await readSession(token, db.current)).toBeNull();
 		expect(await readSession('no such token', db.current)).toBeNull();
+	});
+});
+
+describe('listSessions', () => {
+	test('shows what would still be let in, and the next sign-in clears the rest away', async () => {
+		const { id, email } = await newPerson();
+		const { token: idle } = await signIn(email);
+		const { token: current } = await signIn(email);
+		await db.current
+			.update(sessions)
+			.set({ lastSeenAt: hoursAgo(12.1) })
+			.where(eq(sessions.sessionToken, idle));
+		const currentId = (await readSession(current, db.current))?.person.sessionId;
+		expect((await listSessions(id, db.current)).map((shown) => shown.id)).toEqual([currentId]);
+		await signIn(email);
+		const kept = await db.current.select().from(sessions).where(eq(sessions.userId, id));
+		expect(kept.map(({ sessionToken }) => sessionToken)).not.toContain(idle);
+		expect(kept).toHaveLength(2);
+	});
+});
+
+describe('sessionCookie', () => {
+	test('is bound to this very host over https, and readable by no script either way', () => {
+		const { name, options } = sessionCookie(true);
+		expect(name).toMatch(/^__Host-/);
+		// What the prefix demands; with anything else a browser drops the cookie.
+		expect(options).toEqual({ httpOnly: true, sameSite: 'lax', path: '/', secure: true });
+		expect(sessionCookie(false).name).not.toMatch(/^__/);
+		expect(sessionCookie(false).options).toMatchObject({ httpOnly: true, secure: false });
 	});
 });

@@ -15,7 +15,7 @@ import { mailQueue } from '../mail/mailQueue';
 import { secretToken } from '../mail/secretTokens';
 import { authAdapter } from './adapter';
 import { sessionToken } from './cookie';
-import { absoluteDays } from './sessionRules';
+import { absoluteDays, sessionCookie } from './sessionRules';
 
 const linkMinutes = 15;
 const maxAge = absoluteDays * 86_400;
@@ -44,6 +44,7 @@ const { handle, signIn } = SvelteKitAuth(async (event): Promise<SvelteKitAuthCon
 			updateAge: maxAge,
 			generateSessionToken: () => randomBytes(32).toString('base64url')
 		},
+		cookies: { sessionToken: sessionCookie(event.url.protocol === 'https:') },
 		pages: {
 			signIn: links.signIn(),
 			error: links.signIn(),
@@ -59,13 +60,14 @@ const { handle, signIn } = SvelteKitAuth(async (event): Promise<SvelteKitAuthCon
 					const id = randomUUID();
 					return `${id}.${secretToken('sign-in', id)}`;
 				},
-				sendVerificationRequest: async ({ identifier, token, url }) => {
+				sendVerificationRequest: async ({ identifier, token, url, expires }) => {
 					const next = safeNext(pathOf(new URL(url).searchParams.get('callbackUrl')));
 					const letter = {
 						kind: 'sign-in',
 						id: token.split('.')[0],
 						email: identifier,
-						next
+						next,
+						until: expires.getTime()
 					} as const;
 					await mailQueue().enqueue(letter, database());
 				}

@@ -1,8 +1,9 @@
-import { and, asc, eq, gt, isNull, sql } from 'drizzle-orm';
+import { and, asc, eq, isNull } from 'drizzle-orm';
 import type { Role } from '../../roles';
 import { database, type Queryable } from '../db/database';
-import { memberships, runs, sessions, users, venues } from '../db/schema';
-import { idleHours, seenEverySeconds } from './sessionRules';
+import { memberships, sessions, users, venues } from '../db/schema';
+import { liveSession } from './liveSession';
+import { seenEverySeconds } from './sessionRules';
 
 export interface SignedIn {
 	person: { id: string; name: string; email: string; sessionId: string };
@@ -20,33 +21,23 @@ export async function readSession(
 	token: string,
 	db: Queryable = database()
 ): Promise<SignedIn | null> {
-	const openRun = sql<boolean>`exists (select 1 from ${runs} where ${runs.startedBy} = ${users.id} and ${runs.endedAt} is null)`;
 	const rows = await db
 		.select({
 			session: sessions,
 			name: users.name,
 			email: users.email,
 			roles: memberships.roles,
-			venue: venues,
-			openRun
+			venue: venues
 		})
 		.from(sessions)
 		.innerJoin(users, eq(users.id, sessions.userId))
 		.leftJoin(memberships, eq(memberships.userId, users.id))
 		.leftJoin(venues, eq(venues.id, memberships.venueId))
-		.where(
-			and(
-				eq(sessions.sessionToken, token),
-				gt(sessions.expires, new Date()),
-				isNull(users.disabledAt)
-			)
-		)
+		.where(and(eq(sessions.sessionToken, token), liveSession(), isNull(users.disabledAt)))
 		.orderBy(asc(venues.name), asc(venues.id));
 	if (rows.length === 0) return null;
-	const [{ session, name, email, openRun: inRun }] = rows;
-	const idleMs = Date.now() - session.lastSeenAt.getTime();
-	if (idleMs > idleHours * 3_600_000 && !inRun) return null;
-	if (idleMs > seenEverySeconds * 1000) {
+	const [{ session, name, email }] = rows;
+	if (Date.now() - session.lastSeenAt.getTime() > seenEverySeconds * 1000) {
 		await db
 			.update(sessions)
 			.set({ lastSeenAt: new Date() })

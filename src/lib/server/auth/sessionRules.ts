@@ -8,8 +8,11 @@ export const idleHours = 12;
 /** `lastSeenAt` is written at most this often. */
 export const seenEverySeconds = 60;
 
-/** Name and flags are those Auth.js uses, so that both ways of signing in make one kind of session. */
+/**
+ * The cookie of both ways of signing in. Over https its prefix makes browsers refuse it from any
+ * other host, a subdomain too, and without `secure` or with another path (RFC 6265bis, 4.1.3.2).
+ */
 export const sessionCookie = (secure: boolean) => ({
-	name: `${secure ? '__Secure-' : ''}authjs.session-token`,
+	name: `${secure ? '__Host-' : ''}farwheel-session`,
 	options: { httpOnly: true, sameSite: 'lax' as const, path: '/', secure }
 });

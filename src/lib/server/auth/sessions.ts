@@ -1,6 +1,7 @@
-import { and, desc, eq, gt, ne } from 'drizzle-orm';
+import { and, desc, eq, ne } from 'drizzle-orm';
 import { database, type Queryable } from '../db/database';
 import { sessions } from '../db/schema';
+import { liveSession } from './liveSession';
 
 /** A session as its person sees it: never the token. */
 export interface SessionShown {
@@ -22,7 +23,7 @@ export const listSessions = (userId: string, db: Queryable = database()): Promis
 			address: sessions.address
 		})
 		.from(sessions)
-		.where(and(eq(sessions.userId, userId), gt(sessions.expires, new Date())))
+		.where(and(eq(sessions.userId, userId), liveSession()))
 		.orderBy(desc(sessions.lastSeenAt));
 
 /** Signing out: the token is worth nothing from here on. */

@@ -1,8 +1,9 @@
 import { randomBytes } from 'node:crypto';
-import { and, eq, lt, or } from 'drizzle-orm';
+import { and, eq, or, sql } from 'drizzle-orm';
 import { database, type Queryable } from '../db/database';
 import { sessions } from '../db/schema';
 import { authAdapter } from './adapter';
+import { liveSession } from './liveSession';
 import { absoluteDays } from './sessionRules';
 
 /** The browser that asks, as far as the sessions page shows it. */
@@ -32,7 +33,7 @@ export async function startSession(
 		.where(
 			or(
 				replaces ? eq(sessions.sessionToken, replaces) : undefined,
-				and(eq(sessions.userId, userId), lt(sessions.expires, new Date()))
+				and(eq(sessions.userId, userId), sql`not (${liveSession()})`)
 			)
 		);
 	const session = {

@@ -1,17 +1,16 @@
 import { error, type Handle } from '@sveltejs/kit';
+import { clearSessionCookie, sessionToken } from '../auth/cookie';
 import { readSession } from '../auth/readSession';
-import { sessionCookie } from '../auth/sessionRules';
 import { isDatabaseAway } from '../db/databaseAway';
 import { databaseAwayMessage, problem } from '../http/problem';
 
 /** From the session's cookie to who asks and in which venue. */
 export const session: Handle = async ({ event, resolve }) => {
-	const { name } = sessionCookie(event.url.protocol === 'https:');
-	const token = event.cookies.get(name);
+	const token = sessionToken(event);
 	if (token) {
 		try {
 			const found = await readSession(token);
-			if (!found) event.cookies.delete(name, { path: '/' });
+			if (!found) clearSessionCookie(event);
 			event.locals.person = found?.person ?? null;
 			event.locals.venues =
 				found?.memberships.map(({ venueId, venueName }) => ({ id: venueId, name: venueName })) ??

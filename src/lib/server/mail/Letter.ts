@@ -2,7 +2,8 @@
 export type Letter =
 	| { kind: 'invitation'; id: string }
 	| { kind: 'reset'; id: string }
-	| { kind: 'sign-in'; id: string; email: string; next: string };
+	/** `until`: when its link is over, in ms since 1970; a letter held up so long is not sent. */
+	| { kind: 'sign-in'; id: string; email: string; next: string; until: number };
 
 /** The same letter has the same key, however often its job is tried. */
 export const letterKey = ({ kind, id }: Letter): string => `${kind}:${id}`;

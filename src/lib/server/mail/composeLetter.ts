@@ -16,6 +16,7 @@ export async function composeLetter(
 	db: Queryable
 ): Promise<(MailText & { to: string }) | null> {
 	if (letter.kind === 'sign-in') {
+		if (Date.now() > letter.until) return null;
 		const token = `${letter.id}.${secretToken('sign-in', letter.id)}`;
 		const link = absolute(links.signInLink(letter.email, token, letter.next));
 		return { to: letter.email, ...signInMail({ link }) };

@@ -3,6 +3,7 @@ import type { Role } from '../../roles';
 import { queryable, requireRole, type Context } from '../context';
 import type { Queryable } from '../db/database';
 import { memberships, sessions, users } from '../db/schema';
+import { liveSession } from '../auth/liveSession';
 import { AppError, notFound } from '../errors';
 
 export interface Member {
@@ -20,7 +21,7 @@ export interface Member {
 /** People of the venue by name. */
 export async function listMembers(ctx: Context): Promise<Member[]> {
 	requireRole(ctx, 'people.read');
-	const mine = sql`from ${sessions} where ${sessions.userId} = ${users.id} and ${sessions.expires} > now()`;
+	const mine = sql`from ${sessions} where ${sessions.userId} = ${users.id}`;
 	return queryable(ctx)
 		.select({
 			id: users.id,
@@ -32,7 +33,7 @@ export async function listMembers(ctx: Context): Promise<Member[]> {
 			lastSeenAt: sql<Date | null>`(select max(${sessions.lastSeenAt}) ${mine})`.mapWith(
 				sessions.lastSeenAt
 			),
-			openSessions: sql<number>`(select count(*)::int ${mine})`
+			openSessions: sql<number>`(select count(*)::int ${mine} and ${liveSession()})`
 		})
 		.from(memberships)
 		.innerJoin(users, eq(users.id, memberships.userId))
