@@ -101,6 +101,17 @@ describe('deliverLetter', () => {
 		expect(await deliverLetter({ kind: 'invitation', id }, own, db)).toBe(false);
 		expect(own.sent).toEqual([]);
 	});
+
+	test('sends a sign-in link while it works and not once it is over', async () => {
+		const own = new FakeMailTransport();
+		const letter = { kind: 'sign-in', email: 'late@example.org', next: '/' } as const;
+		const over = { ...letter, id: 'over', until: Date.now() - 1 };
+		expect(await deliverLetter(over, own, db)).toBe(false);
+		expect(own.sent).toEqual([]);
+		const works = { ...letter, id: 'works', until: Date.now() + 60_000 };
+		expect(await deliverLetter(works, own, db)).toBe(true);
+		expect(own.sent[0].text).toContain(`${process.env.ORIGIN}/sign-in/link?email=late%40example`);
+	});
 });
 
 test('mailText escapes words and keeps one link in the text', () => {

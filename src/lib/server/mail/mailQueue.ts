@@ -6,7 +6,14 @@ import { deliverLetter } from './deliverLetter';
 import type { Letter } from './Letter';
 import type { MailTransport } from './transport';
 
-const queue = 'mail';
+const queue = {
+	name: 'mail',
+	// Waits double from some 5 seconds, together at least 5 hours: a mail server may be away so long.
+	retryLimit: 12,
+	retryDelay: 5,
+	retryBackoff: true,
+	expireInMinutes: 2
+};
 
 /** Where verbs put letters, in the transaction of the change they tell of. */
 export interface MailQueue {
@@ -35,21 +42,17 @@ export class BossMailQueue implements MailQueue {
 	/** Makes the queue where it is missing, and takes letters from it where there is a transport. */
 	async start(transport: MailTransport | null): Promise<void> {
 		await this.#boss.start();
-		await this.#boss.createQueue(queue, {
-			name: queue,
-			retryLimit: 8,
-			retryDelay: 5,
-			retryBackoff: true,
-			expireInMinutes: 2
-		});
+		await this.#boss.createQueue(queue.name, queue);
+		// Where it was there already, with the settings of an earlier version.
+		await this.#boss.updateQueue(queue.name, queue);
 		if (!transport) return;
-		await this.#boss.work<Letter>(queue, { pollingIntervalSeconds: 1 }, async (jobs) => {
+		await this.#boss.work<Letter>(queue.name, { pollingIntervalSeconds: 1 }, async (jobs) => {
 			for (const { data } of jobs) await deliverLetter(data, transport, this.#db());
 		});
 	}
 
 	async enqueue(letter: Letter, tx: Queryable): Promise<void> {
-		const id = await this.#boss.send(queue, letter, {
+		const id = await this.#boss.send(queue.name, letter, {
 			db: {
 				executeSql: async (text, values) => ({
 					rows: (await tx.execute(numbered(text, values))).rows

@@ -57,7 +57,13 @@ async function use(tx: Queryable, token: string): Promise<OpenInvitation> {
 		? await tx
 				.update(invitations)
 				.set({ usedAt: new Date() })
-				.where(and(eq(invitations.id, invitation.id), isNull(invitations.usedAt)))
+				.where(
+					and(
+						eq(invitations.id, invitation.id),
+						isNull(invitations.usedAt),
+						isNull(invitations.withdrawnAt)
+					)
+				)
 				.returning({ id: invitations.id })
 		: [];
 	if (!invitation || !used) throw new AppError('not-found', goneMessage);
