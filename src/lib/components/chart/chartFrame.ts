@@ -20,8 +20,12 @@ export interface ChartFrame {
 	narrow: boolean;
 }
 
-/** @param maxRadius kpc @param maxSpeed km/s @param width pixels; the height follows */
-export function chartFrame(width: number, maxRadius: number, maxSpeed: number): ChartFrame {
+/** Pixels; a page that is not laid out yet says 0. */
+const least = 240;
+
+/** @param given width in pixels; the height follows @param maxRadius kpc @param maxSpeed km/s */
+export function chartFrame(given: number, maxRadius: number, maxSpeed: number): ChartFrame {
+	const width = Math.max(least, given);
 	const narrow = width < 560;
 	const height = Math.round(narrow ? width * 0.9 : Math.min(560, Math.max(340, width * 0.6)));
 	const margin = { top: 48, right: narrow ? 84 : 124, bottom: 46, left: narrow ? 40 : 52 };
