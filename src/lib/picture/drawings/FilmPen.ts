@@ -41,6 +41,8 @@ export const inks = {
 
 const words = "'Atkinson Hyperlegible', sans-serif";
 const figures = "'Atkinson Hyperlegible Mono', monospace";
+/** A letter stays with its accents. */
+const letters = new Intl.Segmenter('en', { granularity: 'grapheme' });
 /** Height of a capital as a share of the font size: 0.67 for both faces. */
 const capital = 0.67;
 
@@ -136,22 +138,25 @@ export class FilmPen {
 		const width = this.textWidth(text, style);
 		const start = style.align === 'right' ? -width : style.align === 'left' ? 0 : -width / 2;
 		context.save();
-		context.font = this.#font(style);
 		context.fillStyle = style.colour;
 		context.textAlign = 'left';
 		context.textBaseline = 'alphabetic';
 		context.strokeStyle = inks.ground;
 		context.lineWidth = style.height * 0.3 * this.perDegree;
 		context.lineJoin = 'round';
+		const glyphs: { letter: string; azimuth: number; halfWidth: number }[] = [];
+		let before = 0;
+		for (const { segment, index } of letters.segment(text)) {
+			const upTo = this.textWidth(text.slice(0, index + segment.length), style);
+			const azimuth = at.azimuth + (start + (before + upTo) / 2) / level;
+			if (segment !== ' ')
+				glyphs.push({ letter: segment, azimuth, halfWidth: (upTo - before) / 2 });
+			before = upTo;
+		}
 		// A dark rim under all letters first, so that words can be read over stars.
 		for (const how of ['strokeText', 'fillText'] as const) {
-			let before = 0;
-			for (let i = 0; i < text.length; i++) {
-				const upTo = context.measureText(text.slice(0, i + 1)).width / this.perDegree;
-				const middle = start + (before + upTo) / 2;
-				this.#glyph(how, text[i], at.altitude, at.azimuth + middle / level, (upTo - before) / 2);
-				before = upTo;
-			}
+			for (const { letter, azimuth, halfWidth } of glyphs)
+				this.#glyph(how, letter, at.altitude, azimuth, halfWidth);
 		}
 		context.restore();
 	}

@@ -29,12 +29,40 @@ function* straight(a: AltAz, b: AltAz, steps = 24): Generator<AltAz> {
 	}
 }
 
-/** Heights for the names at the ends of curves, pushed apart so that they do not touch. */
-export function spreadLabels(heights: readonly number[], gap: number): number[] {
+/**
+ * Heights for the names at the ends of curves, pushed apart so that they do not touch and kept between
+ * the lowest and the highest that are allowed, in the order of the curves' ends.
+ */
+export function spreadLabels(
+	heights: readonly number[],
+	gap: number,
+	lowest: number,
+	highest: number
+): number[] {
 	const order = heights.map((h, i) => ({ h, i })).sort((a, b) => a.h - b.h);
-	for (let k = 1; k < order.length; k++) order[k].h = Math.max(order[k].h, order[k - 1].h + gap);
+	order.forEach((one, k) => (one.h = Math.max(one.h, lowest, k ? order[k - 1].h + gap : lowest)));
+	for (let k = order.length - 1, most = highest; k >= 0; k--, most = order[k + 1].h - gap) {
+		order[k].h = Math.min(order[k].h, most);
+	}
 	const out = [...heights];
 	for (const { h, i } of order) out[i] = h;
+	return out;
+}
+
+/** The stretches of a curve that lie on the chart: it leaves at the top and comes back, never across. */
+function stretches(
+	{ radii, speeds }: ChartCurve,
+	{ maxRadius, maxSpeed }: { maxRadius: number; maxSpeed: number },
+	at: (r: number, v: number) => AltAz
+): AltAz[][] {
+	const out: AltAz[][] = [];
+	let open = false;
+	for (let i = 0; i < radii.length; i++) {
+		const inside = radii[i] <= maxRadius && speeds[i] >= 0 && speeds[i] <= maxSpeed;
+		if (inside && !open) out.push([]);
+		if (inside) out.at(-1)?.push(at(radii[i], speeds[i]));
+		open = inside;
+	}
 	return out;
 }
 
@@ -43,6 +71,7 @@ export function drawChart(
 	pen: FilmPen,
 	chart: NonNullable<Drawings['chart']>,
 	field: Field,
+	ground: Field,
 	letter: number
 ): void {
 	const { x, y, at } = placer(field, chart.maxRadius, chart.maxSpeed);
@@ -54,7 +83,7 @@ export function drawChart(
 	context.save();
 	context.globalAlpha = 0.5;
 	context.fillStyle = inks.ground;
-	const [l, r, f, h] = [field.left - 7.5, field.right + 11, field.foot - 5.4, field.head + 3.4];
+	const { left: l, right: r, foot: f, head: h } = ground;
 	pen.path([
 		...straight(corner(l, f), corner(r, f)),
 		...straight(corner(r, f), corner(r, h)),
@@ -104,19 +133,15 @@ export function drawChart(
 
 	const ends = chart.curves.map((curve) => {
 		const style = styles[curve.role];
-		const places: AltAz[] = [];
-		for (let i = 0; i < curve.radii.length; i++) {
-			const speed = curve.speeds[i];
-			if (curve.radii[i] <= chart.maxRadius && speed >= 0 && speed <= chart.maxSpeed) {
-				places.push(at(curve.radii[i], speed));
-			}
+		const drawn = stretches(curve, chart, at);
+		for (const stretch of drawn) {
+			pen.path(stretch);
+			pen.stroke(style.colour, lineWidth * 1.8, style.dash);
 		}
-		pen.path(places);
-		pen.stroke(style.colour, lineWidth * 1.8, style.dash);
-		return places.at(-1)?.altitude ?? field.foot;
+		return drawn.at(-1)?.at(-1)?.altitude ?? field.foot;
 	});
 	for (const point of chart.points) drawPoint(pen, at, point, letter);
-	const heights = spreadLabels(ends, letter * 1.5);
+	const heights = spreadLabels(ends, letter * 1.5, field.foot, field.head);
 	chart.curves.forEach((curve, i) => {
 		pen.text(curve.name, corner(field.right + 0.8, heights[i] - small / 2), {
 			height: small,

@@ -1,3 +1,4 @@
 export { drawOnFilm } from './drawOnFilm';
 export { FilmPen, letterHeight, type FilmContext } from './FilmPen';
-export { drawingsLayout, wrapWords } from './layout';
+export { layOutDrawings, fieldInSafeBand, overlap, type Field, type PlacedWords } from './layout';
+export { wrapWords } from './wrapWords';
