@@ -1,11 +1,8 @@
 import { describe, expect, it, vi } from 'vitest';
 import { makeContent, makeScene } from '../show/support/content';
-import {
-	AutoSave,
-	type Conflict
-} from '../../src/routes/(office)/shows/[id]/composer/AutoSave.svelte';
-import type { Draft, KeptDraft } from '../../src/routes/(office)/shows/[id]/composer/drafts';
-import type { SaveAnswer } from '../../src/routes/(office)/shows/[id]/composer/saveDocument';
+import { AutoSave, type Conflict } from '../../src/lib/components/saving/AutoSave.svelte';
+import type { Draft, KeptDraft } from '../../src/lib/components/saving/drafts';
+import type { SaveAnswer } from '../../src/lib/components/saving/saveDocument';
 import type { ShowDocument } from '../../src/lib/show/document';
 
 const first = makeContent([makeScene(1)]).show;

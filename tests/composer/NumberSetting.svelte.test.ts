@@ -2,7 +2,7 @@ import { describe, expect, it, vi } from 'vitest';
 import { userEvent } from 'vitest/browser';
 import { render } from 'vitest-browser-svelte';
 import { sceneRanges } from '../../src/lib/show/editingControls';
-import NumberSetting from '../../src/routes/(office)/shows/[id]/composer/NumberSetting.svelte';
+import NumberSetting from '../../src/lib/components/settings/NumberSetting.svelte';
 
 const range = sceneRanges.distance;
 

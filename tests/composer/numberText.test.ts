@@ -6,7 +6,7 @@ import {
 	parseNumber,
 	sliderSteps,
 	toSlider
-} from '../../src/routes/(office)/shows/[id]/composer/numberText';
+} from '../../src/lib/components/settings/numberText';
 
 describe('numberText', () => {
 	it('shows and reads the same number', () => {

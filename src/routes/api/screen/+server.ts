@@ -6,7 +6,7 @@ import { notPaired } from '$lib/server/domes/notPaired';
 import { screenOf } from '$lib/server/domes/screenOf';
 import { answering, problem } from '$lib/server/http/problem';
 import { openRunOf } from '$lib/server/runs';
-import { readBody } from '$lib/server/runs/readBody';
+import { readBody } from '$lib/server/http/readBody';
 import type { RequestHandler } from './$types';
 
 /** Who am I: the screen, the geometry of its dome, and the run that is open there. */

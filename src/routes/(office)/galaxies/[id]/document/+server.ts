@@ -2,7 +2,7 @@ import { json } from '@sveltejs/kit';
 import { AppError } from '$lib/server/errors';
 import { copyGalaxy, saveGalaxy } from '$lib/server/galaxies';
 import { answering } from '$lib/server/http/problem';
-import { readJson } from '../../../shows/[id]/readJson';
+import { readJson } from '$lib/server/http/readJson';
 import { contextOf } from '../../contextOf';
 import type { RequestHandler } from './$types';
 

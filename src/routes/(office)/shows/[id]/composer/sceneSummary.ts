@@ -1,5 +1,5 @@
 import type { Scene } from '$lib/show/document';
-import { numberText } from './numberText';
+import { numberText } from '$lib/components/settings/numberText';
 
 const times = (what: string, factor: number): string[] => {
 	if (factor === 1) return [];

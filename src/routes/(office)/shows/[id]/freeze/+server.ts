@@ -4,7 +4,7 @@ import { AppError } from '$lib/server/errors';
 import { answering } from '$lib/server/http/problem';
 import { freezeEdition } from '$lib/server/shows';
 import { contextOf } from '../../contextOf';
-import { readJson } from '../readJson';
+import { readJson } from '$lib/server/http/readJson';
 import type { RequestHandler } from './$types';
 
 const freezeSchema = z.strictObject({

@@ -5,7 +5,7 @@ import { answering, problem } from '$lib/server/http/problem';
 import { readRun, readRunEdition, sendCommand } from '$lib/server/runs';
 import { channels } from '$lib/server/runs/channels';
 import { notices } from '$lib/server/runs/notices';
-import { readBody } from '$lib/server/runs/readBody';
+import { readBody } from '$lib/server/http/readBody';
 import { readPosition, runEventStream } from '$lib/server/runs/runEventStream';
 import type { RequestHandler } from './$types';
 

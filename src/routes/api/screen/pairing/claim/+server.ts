@@ -3,7 +3,7 @@ import { z } from 'zod';
 import { claimPairing } from '$lib/server/domes';
 import { giveToken } from '$lib/server/domes/screenOf';
 import { answering, problem } from '$lib/server/http/problem';
-import { readBody } from '$lib/server/runs/readBody';
+import { readBody } from '$lib/server/http/readBody';
 import type { RequestHandler } from './$types';
 
 const bodySchema = z.strictObject({ claim: z.string().min(20).max(100) });

@@ -1,5 +1,5 @@
 import { AppError, isAppError } from '$lib/server/errors';
-import { readBody } from '$lib/server/runs/readBody';
+import { readBody } from './readBody';
 
 /** Largest show document taken, bytes. Two hundred scenes with long scripts fit. */
 export const largestDocument = 1024 * 1024;
