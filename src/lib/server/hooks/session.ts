@@ -1,8 +1,9 @@
-import { error, type Handle } from '@sveltejs/kit';
+import type { Handle } from '@sveltejs/kit';
 import { clearSessionCookie, sessionToken } from '../auth/cookie';
 import { readSession } from '../auth/readSession';
 import { isDatabaseAway } from '../db/databaseAway';
 import { databaseAwayMessage, problem } from '../http/problem';
+import { awayAnswer } from './awayAnswer';
 
 /** From the session's cookie to who asks and in which venue. */
 export const session: Handle = async ({ event, resolve }) => {
@@ -29,7 +30,7 @@ export const session: Handle = async ({ event, resolve }) => {
 			if (event.route.id?.startsWith('/api/')) {
 				if (!isOpenApi(event.route.id)) return problem(503, databaseAwayMessage);
 			} else if (!event.route.id?.startsWith('/(stage)/dome')) {
-				error(503, { message: databaseAwayMessage, retry: true });
+				return awayAnswer(event);
 			}
 		}
 	}
