@@ -112,7 +112,16 @@ export function choosePainter(wanted: 'auto' | 'plain' | 'webgl', film: number):
 	if (remembered) return remembered;
 	const frame = trialFrame();
 	const plainMs = timePlain(film, frame);
-	const webglMs = timeWebgl(film, frame);
+	let webglMs: number;
+	try {
+		webglMs = timeWebgl(film, frame);
+	} catch (error) {
+		const what = error instanceof Error ? error.message : String(error);
+		return choice(
+			'plain',
+			`WebGL failed when it was tried (${what}), so the plain painter is used.`
+		);
+	}
 	const painter = webglMs < plainMs ? 'webgl' : 'plain';
 	const [faster, slower] = painter === 'webgl' ? [webglMs, plainMs] : [plainMs, webglMs];
 	const name = painter === 'webgl' ? 'WebGL' : 'plain';

@@ -1,5 +1,5 @@
 import { BufferGeometry, Float32BufferAttribute } from 'three';
-import { directionFromAltAz, safeBand } from '$lib/dome/altAz';
+import { directionFromAltAz } from '$lib/dome/altAz';
 import { directionFromFilm, domeProjection } from '$lib/dome/projection';
 import type { AltAz, DomeGeometry, SkyDirection } from '$lib/dome/types';
 
@@ -43,31 +43,13 @@ export function domeMesh(geometry: DomeGeometry): BufferGeometry {
 	return mesh;
 }
 
-function line(places: AltAz[]): BufferGeometry {
+/** A line on the dome, a little inside it, so that the picture does not hide it. */
+export function domeLine(places: readonly AltAz[]): BufferGeometry {
 	const direction: SkyDirection = { x: 0, y: 0, z: 0 };
 	const points = places.flatMap((at) =>
-		// A little inside the dome, so that the picture does not hide the line.
 		toThree(directionFromAltAz(at, direction)).map((c) => c * 0.995)
 	);
 	const geometry = new BufferGeometry();
 	geometry.setAttribute('position', new Float32BufferAttribute(points, 3));
 	return geometry;
-}
-
-const steps = (from: number, to: number, count = 60) =>
-	Array.from({ length: count + 1 }, (_, i) => from + ((to - from) * i) / count);
-
-/** The room's horizon all round. */
-export const horizonLine = (): BufferGeometry =>
-	line(steps(-180, 180, 180).map((azimuth) => ({ altitude: 0, azimuth })));
-
-/** The edge of the safe band. */
-export function safeBandLine(): BufferGeometry {
-	const { azimuth: a, lowest, highest } = safeBand;
-	return line([
-		...steps(-a, a).map((azimuth) => ({ altitude: lowest, azimuth })),
-		...steps(lowest, highest).map((altitude) => ({ altitude, azimuth: a })),
-		...steps(a, -a).map((azimuth) => ({ altitude: highest, azimuth })),
-		...steps(highest, lowest).map((altitude) => ({ altitude, azimuth: -a }))
-	]);
 }
