@@ -16,7 +16,7 @@ import { startTestedApp } from './testedApp.js';
  */
 
 /** Longer than any step takes; a step that hangs is ended. Milliseconds. */
-const patience = 12 * 60_000;
+const patience = 25 * 60_000;
 
 /** @param {string} name @param {string[]} args @param {NodeJS.ProcessEnv} [env] */
 const tool = (name, args, env = {}) =>
