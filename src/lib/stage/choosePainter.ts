@@ -20,7 +20,7 @@ export interface PainterChoice {
 const trialFrames = 5;
 const trialStars = 40_000;
 
-/** A disc of stars as any scene may show it. Same for both painters. */
+/** A disc of stars like those of a scene; the same for both painters. */
 function trialFrame(): Frame {
 	const spec: MassModelSpec = {
 		components: [
