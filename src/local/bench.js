@@ -1,5 +1,5 @@
 import { execFile } from 'node:child_process';
-import { cpus } from 'node:os';
+import { cpus, loadavg } from 'node:os';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { promisify } from 'node:util';
@@ -69,6 +69,7 @@ async function inBrowser() {
 console.log(
 	`Film of ${film} pixels, ${stars.toLocaleString('en-GB')} stars; ${cpus().length} cores, ${cpus()[0]?.model ?? 'unknown processor'}.`
 );
+console.log(`Load of the machine when this began: ${loadavg()[0].toFixed(1)}.`);
 const node = await inNode();
 const page = await inBrowser();
 console.log(`WebGL drawn by: ${page.device}\n`);

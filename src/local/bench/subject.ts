@@ -52,13 +52,41 @@ export interface Times {
 	p99: number;
 }
 
+const summary = (taken: readonly number[]): Times => {
+	const sorted = [...taken].sort((a, b) => a - b);
+	const at = (share: number) =>
+		sorted[Math.min(sorted.length - 1, Math.floor(sorted.length * share))];
+	return { median: at(0.5), p99: at(0.99) };
+};
+
 /** Times a piece of work; the first runs are thrown away, since they warm it up. */
-export function times(work: () => void, runs: number, warm = 5): Times {
-	for (let i = 0; i < warm; i++) work();
-	const taken = Array.from({ length: runs }, () => {
-		const from = performance.now();
-		work();
-		return performance.now() - from;
-	}).sort((a, b) => a - b);
-	return { median: taken[runs >> 1], p99: taken[Math.min(runs - 1, Math.floor(runs * 0.99))] };
+export const times = (work: () => void, runs: number, warm = 5): Times =>
+	timesInTurn({ work }, runs, 1, warm).work;
+
+/**
+ * Times several pieces of work in turn, some runs of each in every round, so that whatever else the
+ * machine does falls on all of them alike.
+ */
+export function timesInTurn<Name extends string>(
+	works: Record<Name, () => void>,
+	runs: number,
+	rounds: number,
+	warm = 3
+): Record<Name, Times> {
+	const names = Object.keys(works) as Name[];
+	const taken = new Map<Name, number[]>(names.map((name) => [name, []]));
+	for (const name of names) for (let i = 0; i < warm; i++) works[name]();
+	for (let round = 0; round < rounds; round++) {
+		for (const [name, list] of taken) {
+			for (let i = 0; i < runs; i++) {
+				const from = performance.now();
+				works[name]();
+				list.push(performance.now() - from);
+			}
+		}
+	}
+	return Object.fromEntries([...taken].map(([name, list]) => [name, summary(list)])) as Record<
+		Name,
+		Times
+	>;
 }
