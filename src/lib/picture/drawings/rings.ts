@@ -2,9 +2,11 @@ import { altAzFromDirection } from '../../dome/altAz';
 import type { AltAz, SkyDirection } from '../../dome/types';
 import { makeCamera, setCamera } from '../camera';
 import type { View } from '../frame';
-import { inks, type FilmPen } from './FilmPen';
+import { inks, lineWidth, type FilmPen } from './FilmPen';
 
 const steps = 180;
+/** Degrees of line and gap. */
+const dash = [1, 0.8];
 
 /** Directions of a closed ring in the galaxy's plane. @param radius kpc */
 export function ringDirections(view: View, radius: number): SkyDirection[] {
@@ -38,5 +40,7 @@ export function drawRing(pen: FilmPen, directions: readonly SkyDirection[]): voi
 		else if (place) context.moveTo(place.x, place.y);
 		open = place !== null;
 	}
-	pen.stroke(inks.soft, undefined, [0.8, 0.6]);
+	// A dark rim under every dash, as under words, so that stars do not eat the line.
+	pen.stroke(inks.ground, 3 * lineWidth, dash);
+	pen.stroke(inks.soft, 1.2 * lineWidth, dash);
 }
