@@ -1,3 +1,4 @@
+import AxeBuilder from '@axe-core/playwright';
 import type { Page } from '@playwright/test';
 import { demoPassword } from '../../src/local/demoPeople.js';
 import { expect, test } from './support/test';
@@ -169,3 +170,31 @@ test('an unknown address helps on', async ({ page, signIn }) => {
 	await page.getByRole('link', { name: 'Go to shows' }).click();
 	await expect(page).toHaveURL(/\/shows$/);
 });
+
+for (const colorScheme of ['light', 'dark'] as const) {
+	test(`doors, people and account have no fault that a machine can find, ${colorScheme}`, async ({
+		page,
+		signIn
+	}) => {
+		await page.emulateMedia({ colorScheme });
+		const check = async (address: string) => {
+			await page.goto(address);
+			const { violations } = await new AxeBuilder({ page }).analyze();
+			expect(violations, address).toEqual([]);
+			await page.setViewportSize({ width: 320, height: 640 });
+			const tooWide = await page.evaluate(
+				() => document.documentElement.scrollWidth - window.innerWidth
+			);
+			expect(tooWide, `${address} at 320 pixels`).toBeLessThanOrEqual(0);
+			await page.setViewportSize({ width: 1280, height: 720 });
+		};
+		for (const address of ['/sign-in', '/forgot', '/join/none', '/reset/none']) {
+			await check(address);
+		}
+		await signIn(page, manager);
+		for (const address of ['/people?invite', '/account', '/no/such/place']) await check(address);
+		await page.goto('/people');
+		await page.getByRole('button', { name: 'Change roles' }).first().click();
+		expect((await new AxeBuilder({ page }).analyze()).violations).toEqual([]);
+	});
+}
