@@ -129,4 +129,14 @@ describe('FilmStage', () => {
 			expect(inked).toBeLessThan((film * film) / 20);
 		});
 	});
+
+	it('fades words with the stars', async () => {
+		const frame = () => ({ ...still, exposure: 0.25 });
+		const drawings = { rings: [], caption: 'It turns too fast.' };
+		const screen = await stage({ painter: 'plain', frame, drawings }).rendered;
+		await vi.waitFor(() => {
+			const layer = canvases(screen.container)[1].parentElement;
+			expect(layer && getComputedStyle(layer).opacity).toBe('0.25');
+		});
+	});
 });

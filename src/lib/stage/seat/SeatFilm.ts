@@ -41,7 +41,11 @@ export class SeatFilm {
 			if (context && drawn)
 				drawOnFilm(context, this.size, drawn.geometry, drawn.view, drawn.drawings);
 		}
-		if (drawn) this.#context.drawImage(this.#overlay, 0, 0);
+		if (!drawn) return;
+		// Words come and go with the stars.
+		this.#context.globalAlpha = frame.exposure;
+		this.#context.drawImage(this.#overlay, 0, 0);
+		this.#context.globalAlpha = 1;
 	}
 
 	pixels(): Uint8ClampedArray {
