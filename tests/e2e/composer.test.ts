@@ -1,27 +1,11 @@
 import type { Page } from '@playwright/test';
+import { addScene, newShow, saved } from './support/composer';
 import { expect, test } from './support/test';
 
 const producer = 'producer@lanternhill.example.org';
 const stranger = 'producer@saltmarsh.example.org';
 
-/** Makes a show and waits until its composer answers. @returns its address */
-async function newShow(page: Page, title: string): Promise<string> {
-	await page.goto('/shows?new');
-	await page.getByLabel('Title of the new show').fill(title);
-	await page.getByRole('button', { name: 'Make the show' }).click();
-	await expect(page.getByRole('heading', { level: 1, name: title })).toBeVisible();
-	return page.url();
-}
-
 const scenes = (page: Page) => page.getByRole('article');
-const saved = (page: Page) => expect(page.locator('[data-save=saved]')).toBeVisible();
-
-async function addScene(page: Page, number: number, title: string, script: string) {
-	await page.getByRole('button', { name: 'Add a scene' }).click();
-	await page.getByLabel(`Title of scene ${number}`).fill(title);
-	await page.getByLabel(`Script of scene ${number}`).fill(script);
-}
-
 test('two scenes are composed, undone, moved by keyboard, and stand after a reload', async ({
 	page,
 	signIn

@@ -1,41 +1,11 @@
-import type { Locator, Page } from '@playwright/test';
+import type { Page } from '@playwright/test';
 import { TICKS_PER_SECOND, timeFromMyr } from '../../src/lib/units';
+import { newDome, openScreen } from './support/domes';
+import { numberOf, readingOf, watchStage, type Reading } from './support/stage';
 import { expect, test } from './support/test';
 
 const technician = 'technician@lanternhill.example.org';
 const presenter = 'presenter@lanternhill.example.org';
-
-/** What the stage says about one moment of its picture. */
-interface Reading {
-	tick: number;
-	phase: number;
-	omega: number;
-	/** Most by which an event has come after it was due, ms. */
-	late: number;
-}
-
-/** Watches the stage and keeps every moment it tells, read in one go so that they belong together. */
-async function watchStage(dome: Page): Promise<() => Promise<Reading[]>> {
-	await dome.evaluate(() => {
-		const stage = document.querySelector<HTMLElement>('[data-stage]');
-		const seen: Record<string, string>[] = [];
-		const look = () => seen.push({ ...(stage?.dataset as Record<string, string>) });
-		const observer = new MutationObserver(look);
-		if (stage) observer.observe(stage, { attributes: true, attributeFilter: ['data-tick'] });
-		Object.assign(window, { seenReadings: seen });
-	});
-	return () =>
-		dome.evaluate(() =>
-			(window as unknown as { seenReadings: Record<string, string>[] }).seenReadings
-				.filter((r) => r.ringPhase !== undefined)
-				.map((r) => ({
-					tick: Number(r.tick),
-					phase: Number(r.ringPhase),
-					omega: Number(r.ringOmega),
-					late: Number(r.late)
-				}))
-		);
-}
 
 /** The scene's own rate, million years a second, as kpc/(km/s) in one tick. */
 const timeOfTick = timeFromMyr(4) / TICKS_PER_SECOND;
@@ -59,24 +29,12 @@ function expectNoJump(readings: Reading[]): void {
 	for (let i = 1; i < readings.length; i++) expectSteady(readings[i - 1], readings[i]);
 }
 
-/** One moment, read in one go. */
-const readingOf = (stage: Locator): Promise<Reading> =>
-	stage.evaluate(({ dataset }: HTMLElement) => ({
-		tick: Number(dataset.tick),
-		phase: Number(dataset.ringPhase),
-		omega: Number(dataset.ringOmega),
-		late: Number(dataset.late)
-	}));
-
 /** Jumps by the list of scenes, as a presenter would. */
 async function jump(desk: Page, title: string): Promise<void> {
 	await desk.getByRole('button', { name: 'Jump', exact: true }).click();
 	await desk.getByRole('dialog').getByRole('button', { name: title }).click();
 	await expect(desk.getByRole('heading', { level: 2, name: title })).toBeVisible();
 }
-
-const numberOf = async (stage: Locator, name: string) =>
-	Number(await stage.getAttribute(`data-${name}`));
 
 test('a show runs on a paired screen from a console, live, through a reload, to its log', async ({
 	browser,
@@ -90,19 +48,11 @@ test('a show runs on a paired screen from a console, live, through a reload, to 
 
 	// A dome of its own, so that the test finds it free however often it runs.
 	const domeName = `Test dome ${Date.now()}`;
-	await office.goto('/domes/new');
-	await office.getByLabel('Name').fill(domeName);
-	await office.getByLabel('Film size').selectOption('1024');
-	await office.getByLabel('Star painter').selectOption('plain');
-	await office.getByRole('button', { name: 'Make the dome' }).click();
-	await expect(office.getByRole('heading', { level: 1, name: domeName })).toBeVisible();
+	await newDome(office, domeName);
 
 	// A second browser shows a code; a wrong one is refused, the right one pairs it.
 	const dome = await pageOf();
-	dome.on('dialog', (dialog) => void dialog.accept());
-	await dome.goto('/dome');
-	const code = (await dome.locator('[data-pairing-code]').getAttribute('data-pairing-code')) ?? '';
-	expect(code).toMatch(/^[CDFGHJKMNPQRTWXY34679]{6}$/);
+	const code = await openScreen(dome);
 	await office.getByLabel('Code').fill('AAA AAA');
 	await office.getByLabel('Name of the screen').fill('Projector computer');
 	await office.getByRole('button', { name: 'Pair', exact: true }).click();
