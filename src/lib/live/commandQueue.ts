@@ -1,3 +1,4 @@
+import { newId } from '../show/editing';
 import type { RunCommand } from '../show/playback';
 
 export interface QueuedCommand {
@@ -48,7 +49,7 @@ export class CommandQueue {
 			command.kind === 'control' &&
 			isSameControl(this.#queue[last].command, command) &&
 			this.#queue[last].failures === 0;
-		const makeKey = this.#options.makeKey ?? (() => crypto.randomUUID());
+		const makeKey = this.#options.makeKey ?? newId;
 		const queued = { command, idempotencyKey: makeKey(), failures: 0 };
 		this.#queue = same ? [...this.#queue.slice(0, last), queued] : [...this.#queue, queued];
 		this.#options.onChange(this.#queue);
