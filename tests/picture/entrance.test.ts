@@ -46,6 +46,12 @@ describe('restShare', () => {
 		expect([10, 10.4, 10.8, 15].map((s) => restShare(at(s, rest)))).toEqual([0, 0.5, 1, 1]);
 		expect([20, 20.4, 20.8].map((s) => restShare(at(s, rest, resume)))).toEqual([1, 0.5, 0]);
 	});
+	it('comes up in 0.8 s after the end, and stays where it was up before', () => {
+		const end: [number, RunCommand] = [10_000, { kind: 'end' }];
+		const rest: [number, RunCommand] = [9_000, { kind: 'rest' }];
+		expect([10, 10.4, 10.8, 60].map((s) => restShare(at(s, end)))).toEqual([0, 0.5, 1, 1]);
+		expect(restShare(at(10, rest, end))).toBe(1);
+	});
 	it('is whole before the run', () => {
 		expect(restShare(playbackAt(content, [], 0))).toBe(1);
 	});

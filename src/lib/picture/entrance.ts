@@ -49,7 +49,10 @@ export function entranceAt(playback: Playback): Entrance {
 export function restShare(playback: Playback): number {
 	const { state } = playback;
 	if (playback.status === 'waiting') return 1;
-	if (playback.status === 'ended') return 1;
+	if (playback.status === 'ended') {
+		if (playback.resting) return 1;
+		return smooth((state.tick - state.endTick) / TICKS_PER_SECOND / restFadeSeconds);
+	}
 	const share = smooth((state.tick - state.restTick) / TICKS_PER_SECOND / restFadeSeconds);
 	return playback.resting ? share : 1 - share;
 }

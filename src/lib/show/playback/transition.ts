@@ -58,7 +58,9 @@ export function advanceTo(
 	state: PlaybackState,
 	tick: number
 ): PlaybackState {
-	if (state.status !== 'running' || tick <= state.tick) return state;
+	if (state.status === 'waiting' || tick <= state.tick) return state;
+	// After the end only the clock goes on: the rest picture comes up by it.
+	if (state.status === 'ended') return { ...state, tick };
 	if (state.held || state.resting) return { ...state, tick };
 	let now = state;
 	while (now.tick < tick) {
