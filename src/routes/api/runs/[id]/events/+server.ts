@@ -1,6 +1,8 @@
 import { json } from '@sveltejs/kit';
 import { z } from 'zod';
 import { queryable } from '$lib/server/context';
+import { sessionToken } from '$lib/server/auth/cookie';
+import { readSession } from '$lib/server/auth/readSession';
 import { answering, problem } from '$lib/server/http/problem';
 import { readRun, readRunEdition, sendCommand } from '$lib/server/runs';
 import { channels } from '$lib/server/runs/channels';
@@ -12,9 +14,11 @@ import type { RequestHandler } from './$types';
 const signInFirst = () => problem(401, 'Sign in to follow or command a run.');
 
 /** Everything that happens in a run, as server-sent events; see runEventStream for the protocol. */
-export const GET: RequestHandler = ({ locals, params, request }) =>
+export const GET: RequestHandler = (event) =>
 	answering(async () => {
+		const { locals, params, request } = event;
 		const { ctx } = locals;
+		const token = sessionToken(event) ?? '';
 		if (!ctx) return signInFirst();
 		const run = await readRun(ctx, params.id);
 		const { hash } = await readRunEdition(ctx, run);
@@ -25,6 +29,11 @@ export const GET: RequestHandler = ({ locals, params, request }) =>
 			followed: {
 				run: async () => ({ id: run.id, editionId: run.editionId, hash }),
 				announcesRuns: false,
+				// Whoever is signed out, disabled or removed stops hearing of the run at the next beat.
+				stillGood: async () => {
+					const session = await readSession(token);
+					return session?.memberships.some(({ venueId }) => venueId === ctx.venueId) ?? false;
+				},
 				concerns: ({ channel, id }) => channel === channels.runs && id === run.id
 			}
 		});
