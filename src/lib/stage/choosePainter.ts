@@ -131,14 +131,30 @@ export function choosePainter(wanted: 'auto' | 'plain' | 'webgl', film: number):
 		plainMs,
 		webglMs
 	};
-	sessionStorage.setItem(memoryKey(film), JSON.stringify(made));
+	remember(film, made);
 	return made;
 }
 
 const memoryKey = (film: number) => `farwheel painter ${film}`;
 
-/** What this tab measured before: a page that is reloaded in the middle of a show must not wait. */
+/** Kept by the tab, since a page that is reloaded in the middle of a show must not wait. */
+function remember(film: number, choice: PainterChoice): void {
+	try {
+		sessionStorage.setItem(memoryKey(film), JSON.stringify(choice));
+	} catch (error) {
+		// A browser that forbids storage measures again at the next load, and that is all it costs.
+		if (!(error instanceof DOMException)) throw error;
+	}
+}
+
+/** @returns what this tab measured before; null where there is nothing that can be read */
 function recall(film: number): PainterChoice | null {
-	const kept = sessionStorage.getItem(memoryKey(film));
-	return kept ? (JSON.parse(kept) as PainterChoice) : null;
+	try {
+		const kept = sessionStorage.getItem(memoryKey(film));
+		const choice = kept ? (JSON.parse(kept) as PainterChoice) : null;
+		return choice?.painter === 'plain' || choice?.painter === 'webgl' ? choice : null;
+	} catch (error) {
+		if (error instanceof DOMException || error instanceof SyntaxError) return null;
+		throw error;
+	}
 }

@@ -13,4 +13,3 @@ export { renameGalaxy, saveGalaxy, type Saved } from './saveGalaxy';
 export { readShelf, shelf, type ShelfEntry } from './shelf';
 export { speedSummary, type SpeedSummary } from './speedSummary';
 export { startingShapes, type StartingShape } from './startingShapes';
-export type { GalaxyIssue } from './parseGalaxy';

@@ -10,6 +10,6 @@ export {
 	type ShowFilter,
 	type ShowListed
 } from './listShows';
-export type { FieldIssue } from './parseDocument';
+export type { FieldIssue } from '../parseOrRefuse';
 export { readShow, type ShowRead } from './readShow';
 export { saveShow, type Saved } from './saveShow';

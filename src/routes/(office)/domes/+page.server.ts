@@ -1,7 +1,7 @@
 import { listDomes, listScreens, isInTouch } from '$lib/server/domes';
 import { orError } from '$lib/server/http/problem';
 import { may } from '$lib/server/permissions';
-import { contextOf } from './contextOf';
+import { contextOf } from '$lib/server/http/contextOf';
 import type { PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async ({ locals, url }) => {

@@ -1,7 +1,7 @@
 import { orError } from '$lib/server/http/problem';
 import { may } from '$lib/server/permissions';
 import { listRuns } from '$lib/server/runs';
-import { contextOf } from './contextOf';
+import { contextOf } from '$lib/server/http/contextOf';
 import type { PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async ({ locals, url }) => {

@@ -11,7 +11,7 @@ import {
 	restoreShow,
 	showFilterSchema
 } from '$lib/server/shows';
-import { contextOf } from './contextOf';
+import { contextOf } from '$lib/server/http/contextOf';
 import type { Actions, PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async ({ locals, url }) => {

@@ -13,7 +13,7 @@ import {
 import { fieldsOrError } from '$lib/server/http/fieldsOrError';
 import { orError } from '$lib/server/http/problem';
 import { may } from '$lib/server/permissions';
-import { contextOf } from '../contextOf';
+import { contextOf } from '$lib/server/http/contextOf';
 import type { Actions, PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async ({ locals, params }) => {

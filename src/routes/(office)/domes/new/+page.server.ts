@@ -4,7 +4,7 @@ import { requireRole } from '$lib/server/context';
 import { createDome, filmSizes, initialDomeSettings } from '$lib/server/domes';
 import { fieldsOrError } from '$lib/server/http/fieldsOrError';
 import { orError } from '$lib/server/http/problem';
-import { contextOf } from '../contextOf';
+import { contextOf } from '$lib/server/http/contextOf';
 import type { Actions, PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async ({ locals }) => {

@@ -1,7 +1,7 @@
 import { orError } from '$lib/server/http/problem';
 import { may } from '$lib/server/permissions';
 import { readEdition } from '$lib/server/shows';
-import { contextOf } from '../../shows/contextOf';
+import { contextOf } from '$lib/server/http/contextOf';
 import type { PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async ({ locals, params }) => {

@@ -5,7 +5,7 @@ import { orError } from '$lib/server/http/problem';
 import { may } from '$lib/server/permissions';
 import { eventsAfter, readRun, readRunEdition, runLog, saveLog } from '$lib/server/runs';
 import { totalSeconds } from '$lib/show/timing';
-import { contextOf } from '../contextOf';
+import { contextOf } from '$lib/server/http/contextOf';
 import type { Actions, PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async ({ locals, params }) => {

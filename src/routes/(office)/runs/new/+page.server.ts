@@ -5,7 +5,7 @@ import { isAppError } from '$lib/server/errors';
 import { orError } from '$lib/server/http/problem';
 import { may } from '$lib/server/permissions';
 import { editionsToRun, startRun } from '$lib/server/runs';
-import { contextOf } from '../contextOf';
+import { contextOf } from '$lib/server/http/contextOf';
 import type { Actions, PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async ({ locals, url }) => {

@@ -3,7 +3,7 @@ import { AppError } from '$lib/server/errors';
 import { copyGalaxy, saveGalaxy } from '$lib/server/galaxies';
 import { answering } from '$lib/server/http/problem';
 import { readJson } from '$lib/server/http/readJson';
-import { contextOf } from '../../contextOf';
+import { contextOf } from '$lib/server/http/contextOf';
 import type { RequestHandler } from './$types';
 
 /** Largest galaxy taken; 32 components with long sources fit many times over. */

@@ -3,7 +3,7 @@ import { links } from '$lib/links';
 import { copyFromShelf, readShelf } from '$lib/server/galaxies';
 import { orError } from '$lib/server/http/problem';
 import { may } from '$lib/server/permissions';
-import { contextOf } from '../../contextOf';
+import { contextOf } from '$lib/server/http/contextOf';
 import { jsonField } from '../../jsonField';
 import type { Actions, PageServerLoad } from './$types';
 

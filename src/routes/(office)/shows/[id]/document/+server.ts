@@ -2,7 +2,7 @@ import { json } from '@sveltejs/kit';
 import { AppError } from '$lib/server/errors';
 import { answering } from '$lib/server/http/problem';
 import { copyShow, saveShow } from '$lib/server/shows';
-import { contextOf } from '../../contextOf';
+import { contextOf } from '$lib/server/http/contextOf';
 import { readJson } from '$lib/server/http/readJson';
 import type { RequestHandler } from './$types';
 

@@ -3,7 +3,7 @@ import { z } from 'zod';
 import { AppError } from '$lib/server/errors';
 import { answering } from '$lib/server/http/problem';
 import { freezeEdition } from '$lib/server/shows';
-import { contextOf } from '../../contextOf';
+import { contextOf } from '$lib/server/http/contextOf';
 import { readJson } from '$lib/server/http/readJson';
 import type { RequestHandler } from './$types';
 

@@ -1,5 +1,5 @@
 import { error } from '@sveltejs/kit';
-import type { Context } from '$lib/server/context';
+import type { Context } from '../context';
 
 /** Who asks. The hooks guard these pages; this is for the compiler and for a guard that was lost. */
 export function contextOf(locals: App.Locals): Context {
