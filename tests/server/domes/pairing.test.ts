@@ -106,6 +106,18 @@ describe('pairing', () => {
 		);
 	});
 
+	it('lets five wrong codes through and no more when they come side by side', async () => {
+		const hasty = await contextFor(db, venue, ['technician']);
+		const answers = await Promise.allSettled(
+			Array.from({ length: 12 }, () =>
+				typePairingCode(hasty, { code: 'AAAAAA', domeId, name: 'Screen' })
+			)
+		);
+		const codes = answers.map((a) => (a.status === 'rejected' ? a.reason.code : 'paired'));
+		expect(codes.filter((code) => code === 'invalid')).toHaveLength(5);
+		expect(codes.filter((code) => code === 'too-many')).toHaveLength(7);
+	});
+
 	it('pairs nothing with a dome of another venue', async () => {
 		const stranger = await contextFor(db, await makeVenue(db, 'Other'), ['technician']);
 		const { code } = await request();

@@ -1,8 +1,12 @@
 import { describe, expect, test } from 'vitest';
 import { awayAnswer } from '../../../src/lib/server/hooks/awayAnswer';
 
-const asked = (headers: Record<string, string>, isDataRequest = false) =>
-	awayAnswer({ isDataRequest, request: new Request('http://farwheel.test/shows', { headers }) });
+const asked = (headers: Record<string, string>, isDataRequest = false, method = 'GET') =>
+	awayAnswer({
+		isDataRequest,
+		route: { id: '/(office)/shows' },
+		request: new Request('http://farwheel.test/shows', { headers, method })
+	});
 
 describe('awayAnswer', () => {
 	test('gives a reader a page that says why and offers to try again', async () => {
@@ -27,5 +31,12 @@ describe('awayAnswer', () => {
 			503,
 			{ type: 'error', status: 503, error }
 		]);
+	});
+
+	test('gives a script that saves problem details, whatever it accepts', async () => {
+		const answer = asked({ accept: '*/*' }, false, 'PUT');
+		expect(answer.status).toBe(503);
+		expect(answer.headers.get('content-type')).toBe('application/problem+json');
+		expect(await answer.json()).toMatchObject({ status: 503, retry: true });
 	});
 });

@@ -5,7 +5,7 @@ import { database, type Database } from '../db/database';
 import { domes, pairings, screens } from '../db/schema';
 import { AppError, notFound } from '../errors';
 import { hashSecret, makeCode, makeSecret, normalCode } from './pairingCode';
-import { countTry, requireTriesLeft, type TryLimit } from './tries';
+import { countTry, giveBackTry, requireTriesLeft, type TryLimit } from './tries';
 
 export const pairingMinutes = 10;
 const wrongTries = 5;
@@ -98,7 +98,11 @@ export async function typePairingCode(
 		windowSeconds: pairingMinutes * 60
 	};
 	const outside = queryable({ db: ctx.db });
-	await requireTriesLeft(outside, limit, `Five wrong codes in ${pairingMinutes} minutes.`);
+	const tooMany = `Five wrong codes in ${pairingMinutes} minutes.`;
+	await requireTriesLeft(outside, limit, tooMany);
+	// Counted before it is tried, so that codes sent side by side cannot pass together.
+	const tries = await countTry(outside, limit);
+	if (tries > wrongTries) await requireTriesLeft(outside, limit, tooMany);
 	const screenId = await inTransaction(ctx, async (tx) => {
 		const [dome] = await tx
 			.select({ id: domes.id, archivedAt: domes.archivedAt })
@@ -129,9 +133,14 @@ export async function typePairingCode(
 			details: { domeId, name }
 		});
 		return screen.id;
+	}).catch(async (thrown: unknown) => {
+		await giveBackTry(outside, limit);
+		throw thrown;
 	});
-	if (screenId) return { screenId };
-	const tries = await countTry(outside, limit);
+	if (screenId) {
+		await giveBackTry(outside, limit);
+		return { screenId };
+	}
 	const left = Math.max(0, wrongTries - tries);
 	throw new AppError(
 		'invalid',

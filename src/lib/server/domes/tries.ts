@@ -48,3 +48,8 @@ export async function requireTriesLeft(db: Queryable, limit: TryLimit, what: str
 		{ waitSeconds }
 	);
 }
+
+/** Gives a counted try back, where what was tried turned out right or was not a try at all. */
+export async function giveBackTry(db: Queryable, { key }: TryLimit): Promise<void> {
+	await db.execute(sql`update rate_limits set points = greatest(points - 1, 0) where key = ${key}`);
+}

@@ -1,5 +1,6 @@
-import { redirect, type Handle, type RequestEvent } from '@sveltejs/kit';
+import { redirect, type Handle } from '@sveltejs/kit';
 import { links } from '$lib/links';
+import { asksForJson } from '../http/asksForJson';
 import { problem } from '../http/problem';
 import { isOpenApi } from './session';
 
@@ -8,17 +9,6 @@ export const needsSignIn = (routeId: string): boolean =>
 	routeId.startsWith('/(office)') ||
 	routeId.startsWith('/(stage)/runs') ||
 	(routeId.startsWith('/api/') && !isOpenApi(routeId));
-
-/** Whether the answer is read by a script: problem details then, and no redirect. */
-function asksForJson({ request, route, isDataRequest }: RequestEvent): boolean {
-	if (route.id?.startsWith('/api/')) return true;
-	if (isDataRequest || request.headers.has('x-sveltekit-action')) return false;
-	const accept = request.headers.get('accept') ?? '';
-	if (request.method === 'GET' || request.method === 'HEAD') {
-		return accept.startsWith('application/json');
-	}
-	return !accept.includes('text/html');
-}
 
 export const guard: Handle = async ({ event, resolve }) => {
 	const { route, locals, url, request } = event;
