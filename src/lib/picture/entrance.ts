@@ -1,10 +1,9 @@
 import type { Playback } from '../show/playback';
-import { goesOn } from '../show/playback/transition';
+import { restFadeTicks, type LeftScene, type MotionStretch } from '../show/playback/state';
+import { goesOn, openStretch } from '../show/playback/transition';
 import { TICKS_PER_SECOND } from '../units';
 import type { View } from './frame';
 
-/** Seconds in which the rest picture comes and goes: 0.8, never a flash. House rule, no source. */
-const restFadeSeconds = 0.8;
 /** Share of an entrance in which the scene that leaves goes dark. */
 const leavingShare = 0.4;
 
@@ -15,46 +14,60 @@ export const smooth = (x: number) => {
 	return t * t * (3 - 2 * t);
 };
 
+/** What is seen of a scene that comes on, or of the one that leaves for it. */
 export interface Entrance {
-	/** Which scene is seen: the new one, or for its first moments the one that leaves. */
-	shows: 'scene' | 'left';
+	/** The stretch of motion that is seen; its scene says what is shown. */
+	motion: MotionStretch;
 	/** 0 dark to 1 full. */
 	exposure: number;
-	/** 0 at the old view, 1 at the new one; below 1 only where the stars go on. */
-	viewShare: number;
+	view: View;
+}
+
+/** A scene and how it came. */
+interface Coming {
+	motion: MotionStretch;
+	enteredTick: number;
+	left: LeftScene | null;
+}
+
+function comingAt({ motion, enteredTick, left }: Coming, tick: number): Entrance {
+	const { scene } = motion;
+	const there: Entrance = { motion, exposure: 1, view: scene.view };
+	if (scene.entrance.kind === 'cut') return there;
+	const share = (tick - enteredTick) / TICKS_PER_SECOND / scene.entrance.seconds;
+	if (share >= 1) return there;
+	if (!left) return { ...there, exposure: smooth(share) };
+	// What was seen when this scene was called: the one it left, or still the one before that.
+	const from = comingAt(left, enteredTick);
+	if (from.motion === left.motion && goesOn(left.motion.scene, scene)) {
+		return {
+			...there,
+			exposure: between(from.exposure, 1, smooth(share)),
+			view: viewBetween(from.view, scene.view, smooth(share))
+		};
+	}
+	return share < leavingShare
+		? { ...from, exposure: from.exposure * (1 - smooth(share / leavingShare)) }
+		: { ...there, exposure: smooth((share - leavingShare) / (1 - leavingShare)) };
 }
 
 /**
  * How a scene comes on. A cut is there at once. A fade darkens what was there and lights what
- * comes; where the same galaxy goes on it stays lit and the view eases over.
+ * comes; where the same galaxy goes on it stays lit and the view eases over. Whatever is pressed on
+ * the way begins at the light and the view that are there.
  */
-export function entranceAt(playback: Playback): Entrance {
-	const { scene, state } = playback;
-	const done: Entrance = { shows: 'scene', exposure: 1, viewShare: 1 };
-	if (scene.entrance.kind === 'cut' || playback.status === 'waiting') return done;
-	const share = (state.tick - state.enteredTick) / TICKS_PER_SECOND / scene.entrance.seconds;
-	if (share >= 1) return done;
-	if (!state.left) return { ...done, exposure: smooth(share) };
-	if (goesOn(state.left.motion.scene, scene)) return { ...done, viewShare: smooth(share) };
-	return share < leavingShare
-		? { shows: 'left', exposure: 1 - smooth(share / leavingShare), viewShare: 1 }
-		: {
-				shows: 'scene',
-				exposure: smooth((share - leavingShare) / (1 - leavingShare)),
-				viewShare: 1
-			};
+export function entranceAt({ content, state, status }: Playback): Entrance {
+	const motion = openStretch(content, state);
+	return status === 'waiting'
+		? { motion, exposure: 1, view: motion.scene.view }
+		: comingAt({ motion, enteredTick: state.enteredTick, left: state.left }, state.tick);
 }
 
 /** 1 where the rest picture is fully there, 0 where the scene is. */
-export function restShare(playback: Playback): number {
-	const { state } = playback;
-	if (playback.status === 'waiting') return 1;
-	if (playback.status === 'ended') {
-		if (playback.resting) return 1;
-		return smooth((state.tick - state.endTick) / TICKS_PER_SECOND / restFadeSeconds);
-	}
-	const share = smooth((state.tick - state.restTick) / TICKS_PER_SECOND / restFadeSeconds);
-	return playback.resting ? share : 1 - share;
+export function restShare({ status, resting, state }: Playback): number {
+	if (status === 'waiting') return 1;
+	const share = smooth((state.tick - state.restTick) / restFadeTicks);
+	return resting || status === 'ended' ? share : 1 - share;
 }
 
 const between = (a: number, b: number, share: number) => a + (b - a) * share;

@@ -6,7 +6,7 @@ import type { MotionStretch, Playback } from '../show/playback';
 import { openStretch } from '../show/playback/transition';
 import { sampleBackground, sampleStars } from '../starfield';
 import type { BackgroundSky, RingTable, StarList } from '../starfield/types';
-import { entranceAt, restShare, viewBetween, type Entrance } from './entrance';
+import { entranceAt, restShare } from './entrance';
 import type { Drawings, Frame, StarLayer, View } from './frame';
 import { RingMotions, type Angles } from './ringMotion';
 import { sceneDrawings } from './sceneDrawings';
@@ -52,30 +52,29 @@ export class ShowPicture {
 	frameAt(playback: Playback, geometry: DomeGeometry): Frame {
 		const rest = restShare(playback);
 		const entrance = entranceAt(playback);
-		const seen = this.#seen(playback, entrance);
+		const { scene } = entrance.motion;
 		const resting = rest >= 0.5;
-		const galaxyId = seen.scene.subject.kind === 'galaxy' ? seen.scene.subject.galaxyId : null;
+		const galaxyId = galaxyOf(scene);
 		return {
 			geometry,
-			view: this.#viewOf(playback, entrance, seen.scene),
-			layers: resting || !galaxyId ? [] : this.#layers(galaxyId, seen),
+			view: entrance.view,
+			layers: resting || !galaxyId ? [] : this.#layers(galaxyId, entrance.motion),
 			background: this.#background,
-			colour: seen.scene.colour,
+			colour: scene.colour,
 			speedRange: galaxyId ? this.#galaxy(galaxyId).speedRange : [0, 1],
 			// The scene goes dark in the first half of the way and the rest picture lights in the second.
 			exposure: resting ? restExposure * (2 * rest - 1) : entrance.exposure * (1 - 2 * rest)
 		};
 	}
 
-	/** What is drawn and written over the stars; empty under the rest picture. */
+	/** What is drawn and written over the stars that are seen; empty under the rest picture. */
 	drawingsAt(playback: Playback): Drawings {
-		const entrance = entranceAt(playback);
-		if (restShare(playback) > 0 || entrance.shows === 'left') return { rings: [] };
-		const { scene } = playback;
-		const galaxyId = scene.subject.kind === 'galaxy' ? scene.subject.galaxyId : null;
+		if (restShare(playback) >= 0.5) return { rings: [] };
+		const { scene, controls } = entranceAt(playback).motion;
+		const galaxyId = galaxyOf(scene);
 		return sceneDrawings(
 			scene,
-			playback.controls,
+			controls,
 			galaxyId ? this.content.galaxies[galaxyId] : null,
 			galaxyId ? this.#galaxy(galaxyId).speedRange : [0, 1]
 		);
@@ -83,17 +82,14 @@ export class ShowPicture {
 
 	/** A text that stays the same while the drawings do: they are made again when it changes. */
 	drawingsKey(playback: Playback): string {
-		const entrance = entranceAt(playback);
-		const hidden = restShare(playback) > 0 || entrance.shows === 'left';
-		return hidden
-			? 'none'
-			: `${playback.scene.id} ${entrance.viewShare} ${JSON.stringify(playback.controls)}`;
+		if (restShare(playback) >= 0.5) return 'none';
+		const { motion, view } = entranceAt(playback);
+		return JSON.stringify([motion.scene.id, motion.controls, view]);
 	}
 
 	/** The view of a moment, eased where the stars go on from the scene before. */
 	viewAt(playback: Playback): View {
-		const entrance = entranceAt(playback);
-		return this.#viewOf(playback, entrance, this.#seen(playback, entrance).scene);
+		return entranceAt(playback).view;
 	}
 
 	/**
@@ -115,19 +111,6 @@ export class ShowPicture {
 			phase: angles.full[k],
 			omega: motion.frequencies(open).full[k]
 		};
-	}
-
-	#seen(playback: Playback, entrance: Entrance): MotionStretch {
-		return entrance.shows === 'left' && playback.state.left
-			? playback.state.left.motion
-			: openStretch(playback.content, playback.state);
-	}
-
-	#viewOf(playback: Playback, entrance: Entrance, scene: Scene): View {
-		const { left } = playback.state;
-		return left && entrance.viewShare < 1
-			? viewBetween(left.motion.scene.view, scene.view, entrance.viewShare)
-			: scene.view;
 	}
 
 	#layers(galaxyId: string, stretch: MotionStretch): StarLayer[] {
@@ -175,6 +158,9 @@ export class ShowPicture {
 		return made;
 	}
 }
+
+const galaxyOf = ({ subject }: Scene): string | null =>
+	subject.kind === 'galaxy' ? subject.galaxyId : null;
 
 /** 0 to the fastest circular speed of the galaxy as it was made, in whole steps of 50 km/s. */
 function speedRangeOf(

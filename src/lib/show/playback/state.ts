@@ -14,11 +14,20 @@ export interface MotionStretch {
 	readonly opensScene: boolean;
 }
 
-/** Where the picture came from, for the seconds of an entrance. */
+/**
+ * Where the picture came from, for the seconds of an entrance. A scene that is left while it was
+ * still coming on remembers where it came from in its turn, so that nothing jumps into light.
+ */
 export interface LeftScene {
 	readonly index: number;
 	readonly motion: MotionStretch;
+	/** Tick of the run at which that scene had come on. */
+	readonly enteredTick: number;
+	readonly left: LeftScene | null;
 }
+
+/** Ticks in which the rest picture comes and goes: 0.8 s, never a flash. House rule, no source. */
+export const restFadeTicks = 48;
 
 /** Times in ticks of 1/60 s since the run began. */
 export interface PlaybackState {

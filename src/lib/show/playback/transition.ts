@@ -3,7 +3,7 @@ import type { Scene } from '../document';
 import type { EditionContent } from '../edition';
 import { clampControl, restingValues } from '../settings';
 import type { RunEvent } from './messages';
-import { initialState, type MotionStretch, type PlaybackState } from './state';
+import { initialState, restFadeTicks, type MotionStretch, type PlaybackState } from './state';
 
 /** Ticks of a timed scene; Infinity where it waits for the presenter. */
 const sceneLimit = (scene: Scene): number =>
@@ -33,6 +33,18 @@ const sameGalaxy = (a: Scene, b: Scene): boolean =>
 export const goesOn = (scene: Scene, next: Scene): boolean =>
 	next.motion.begin === 'go-on' && sameGalaxy(scene, next);
 
+const isComingOn = ({ entrance }: Scene, { tick, enteredTick }: PlaybackState): boolean =>
+	entrance.kind === 'fade' && tick - enteredTick < entrance.seconds * TICKS_PER_SECOND;
+
+/**
+ * The tick from which the rest picture comes or goes, so that a turn in the middle of the way begins
+ * where the picture is: what had gone so far is what is left to go.
+ */
+function restTurned(state: PlaybackState): number {
+	const gone = Math.min(restFadeTicks, state.tick - state.restTick);
+	return state.tick - (restFadeTicks - gone);
+}
+
 function enterScene(content: EditionContent, state: PlaybackState, index: number): PlaybackState {
 	const scene = content.show.scenes[index];
 	const motion = openStretch(content, state);
@@ -45,7 +57,12 @@ function enterScene(content: EditionContent, state: PlaybackState, index: number
 		closed: goesOn(motion.scene, scene) ? motion : null,
 		openTicks: 0,
 		opensScene: true,
-		left: { index: state.sceneIndex, motion }
+		left: {
+			index: state.sceneIndex,
+			motion,
+			enteredTick: state.enteredTick,
+			left: isComingOn(motion.scene, state) ? state.left : null
+		}
 	};
 }
 
@@ -138,14 +155,20 @@ export function transition(
 		case 'go-on':
 			return { ...state, held: false };
 		case 'rest':
-			return state.resting ? state : { ...state, resting: true, restTick: state.tick };
+			return state.resting ? state : { ...state, resting: true, restTick: restTurned(state) };
 		case 'resume':
-			return state.resting ? { ...state, resting: false, restTick: state.tick } : state;
+			return state.resting ? { ...state, resting: false, restTick: restTurned(state) } : state;
 		case 'control':
 			return command.scene === here.id
 				? setControl(content, state, command.control, command.value)
 				: state;
 		case 'end':
-			return { ...state, status: 'ended', endTick: state.tick };
+			// The rest picture comes up, or stays where it was on its way.
+			return {
+				...state,
+				status: 'ended',
+				endTick: state.tick,
+				restTick: state.resting ? state.restTick : restTurned(state)
+			};
 	}
 }
