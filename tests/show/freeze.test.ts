@@ -53,6 +53,16 @@ describe('findFaults', () => {
 		expect(fault.remedy).toBe('Change it in the script.');
 	});
 
+	it('tries the galaxy at the limits of the live controls, not only at rest', () => {
+		const heavy = (content: EditionContent) => {
+			const halo = content.galaxies[galaxyId].document.model.components.find((c) => !c.lit);
+			if (halo) halo.factor = 9;
+		};
+		expect(faultsOf({}, heavy)).toEqual([]);
+		const [fault] = faultsOf({ controls: [control({})] }, heavy);
+		expect(fault.what).toContain('cannot be computed');
+	});
+
 	it('tells a missing galaxy from an archived one', () => {
 		const content = makeContent([
 			makeScene(1, { subject: { kind: 'galaxy', galaxyId: uuid(901) } })

@@ -4,6 +4,7 @@ import type { GalaxyDocument } from '../show/galaxy';
 import { advance, createRingTable, sampleBackground, sampleStars, setModel } from '../starfield';
 import type { BackgroundSky, RingTable, StarList } from '../starfield/types';
 import { TICKS_PER_SECOND, timeFromMyr } from '../units';
+import { speedRange } from './speedRange';
 import type { Frame, View } from './frame';
 
 export interface GalaxyPictureOptions {
@@ -116,12 +117,7 @@ export class GalaxyPicture {
 	#takeSpeeds(): void {
 		setModel(this.#rings, massModel(this.#document.model));
 		const { radii, omega } = this.#rings;
-		let top = 0;
-		// A point mass is infinitely fast in the middle; the innermost rings do not set the scale.
-		for (let k = Math.ceil(radii.length / 20); k < radii.length; k++) {
-			top = Math.max(top, omega[k] * radii[k]);
-		}
-		this.#speedRange = [0, Math.max(50, Math.ceil(top / 50) * 50)];
+		this.#speedRange = speedRange(radii, (k) => omega[k] * radii[k]);
 	}
 
 	#sample(): StarList | null {

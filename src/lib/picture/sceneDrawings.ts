@@ -3,9 +3,10 @@ import type { Scene } from '../show/document';
 import type { EditionGalaxy } from '../show/edition';
 import { filledText } from '../show/figures';
 import { significant } from '../show/figureWords';
-import { effectiveModel, sceneSettings, type ControlValues } from '../show/settings';
+import { effectiveModel, limitValues, sceneSettings, type ControlValues } from '../show/settings';
 import { lightYearsFromKpc } from '../units';
 import type { ChartCurve, Drawings } from './frame';
+import { speedRange } from './speedRange';
 
 /** Points of a curve on the dome's chart. */
 const chartPoints = 120;
@@ -14,12 +15,21 @@ const chartPoints = 120;
 export const ringLabel = (R: number): string =>
 	`${significant(lightYearsFromKpc(R), 2)} light years`;
 
+/** Fastest speed on the chart wherever the presenter may put the controls: the axis stands still. */
+const topAtLimits = (scene: Scene, galaxy: EditionGalaxy, radii: readonly number[]): number =>
+	Math.max(
+		...limitValues(scene).map((values) => {
+			const model = massModel(effectiveModel(galaxy.document, sceneSettings(scene, values)));
+			return speedRange(radii, (k) => model.circularVelocity(radii[k]))[1];
+		})
+	);
+
 /** What a scene draws and writes over its stars, with its live controls where they stand. */
 export function sceneDrawings(
 	scene: Scene,
 	controls: ControlValues,
 	galaxy: EditionGalaxy | null,
-	speedRange: [number, number]
+	scale: [number, number]
 ): Drawings {
 	const { drawings } = scene;
 	if (!galaxy) {
@@ -57,13 +67,13 @@ export function sceneDrawings(
 					})
 				}
 			: {}),
-		...(drawings.scale && scene.colour === 'speed' ? { scale: speedRange } : {}),
+		...(drawings.scale && scene.colour === 'speed' ? { scale } : {}),
 		...(scene.comparison === 'halves' ? { halves: ['without halo', 'with halo'] } : {}),
 		...(drawings.chart
 			? {
 					chart: {
 						maxRadius,
-						maxSpeed: speedRange[1] * 1.2,
+						maxSpeed: 1.2 * Math.max(scale[1], topAtLimits(scene, galaxy, radii)),
 						curves,
 						points: drawings.chartMeasured
 							? galaxy.measured.filter((p) => p.radius <= maxRadius)

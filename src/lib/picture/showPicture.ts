@@ -10,6 +10,7 @@ import { entranceAt, restShare } from './entrance';
 import type { Drawings, Frame, StarLayer, View } from './frame';
 import { RingMotions, type Angles } from './ringMotion';
 import { sceneDrawings } from './sceneDrawings';
+import { speedRange } from './speedRange';
 
 /** Light of the rest picture's star field, 0 to 1. */
 const restExposure = 0.6;
@@ -138,6 +139,7 @@ export class ShowPicture {
 		const motion = this.#motions.of(galaxyId);
 		const { model, look } = galaxy.document;
 		const angles = motion.makeAngles();
+		const whole = massModel(model);
 		const table = (phase: Float64Array): RingTable => ({
 			radii: motion.radii,
 			omega: new Float64Array(motion.radii.length),
@@ -152,7 +154,7 @@ export class ShowPicture {
 			angles,
 			full: table(angles.full),
 			bare: table(angles.bare),
-			speedRange: speedRangeOf(massModel(model), motion.radii)
+			speedRange: speedRange(motion.radii, (k) => whole.circularVelocity(motion.radii[k]))
 		};
 		this.#galaxies.set(galaxyId, made);
 		return made;
@@ -161,13 +163,3 @@ export class ShowPicture {
 
 const galaxyOf = ({ subject }: Scene): string | null =>
 	subject.kind === 'galaxy' ? subject.galaxyId : null;
-
-/** 0 to the fastest circular speed of the galaxy as it was made, in whole steps of 50 km/s. */
-function speedRangeOf(
-	model: { circularVelocity(R: number): number },
-	radii: Float64Array
-): [number, number] {
-	let top = 0;
-	for (const R of radii) top = Math.max(top, model.circularVelocity(R) || 0);
-	return [0, Math.max(50, Math.ceil(top / 50) * 50)];
-}

@@ -5,7 +5,7 @@ import type { LiveControl, Scene } from './document';
 import type { EditionContent, EditionGalaxy } from './edition';
 import { controlRange, targetKey } from './editingControls';
 import { fillFigures } from './figures';
-import { effectiveModel, sceneSettings } from './settings';
+import { effectiveModel, limitValues, sceneSettings, type ControlValues } from './settings';
 
 /** Why a show cannot be frozen, and what to do about it. */
 export interface Fault {
@@ -77,7 +77,8 @@ function sceneFindings(
 					}
 		];
 	}
-	const model = modelOf(scene, galaxy);
+	const models = limitValues(scene).map((values) => modelOf(scene, galaxy, values));
+	const model = models.find((one) => !('circularVelocity' in one)) ?? models[0];
 	if (!('circularVelocity' in model)) return [...controlFindings(scene, galaxy), model];
 	return [
 		...matterFindings(scene, galaxy),
@@ -86,15 +87,15 @@ function sceneFindings(
 	];
 }
 
-/** The model with live controls at rest, or why there is none. */
-function modelOf(scene: Scene, galaxy: EditionGalaxy): MassModel | Finding {
+/** The model with live controls where they stand, or why there is none. */
+function modelOf(scene: Scene, galaxy: EditionGalaxy, values: ControlValues): MassModel | Finding {
 	try {
-		return massModel(effectiveModel(galaxy.document, sceneSettings(scene, {})));
+		return massModel(effectiveModel(galaxy.document, sceneSettings(scene, values)));
 	} catch (thrown) {
 		if (!(thrown instanceof ParameterError)) throw thrown;
 		return {
 			what: `The galaxy cannot be computed: ${thrown.message}`,
-			remedy: 'Change the value in the galaxy, in Picture, or the resting value of the control.'
+			remedy: 'Change the value in the galaxy, in Picture, or the values of the control.'
 		};
 	}
 }

@@ -66,3 +66,10 @@ export function effectiveModel(galaxy: GalaxyDocument, settings: SceneSettings):
 		})
 	};
 }
+
+/** Values of the controls to try where a scene must hold at all of them: at rest, and each at its limits. */
+export const limitValues = (scene: Scene): ControlValues[] => [
+	{},
+	...scene.controls.flatMap(({ id, min, max }) => [{ [id]: min }, { [id]: max }]),
+	Object.fromEntries(scene.controls.map(({ id, max }) => [id, max]))
+];

@@ -34,6 +34,9 @@ export interface AutoSaveOptions<D = ShowDocument> {
 	retry?: number;
 }
 
+const unexpected = (thrown: unknown): string =>
+	`The server's answer could not be read (${thrown instanceof Error ? thrown.message : String(thrown)}). Your work is kept in this browser and is sent again.`;
+
 /**
  * Saves a document by itself, one save at a time. What is not yet on the server is kept as a draft
  * in the browser from the moment it is written until it is saved.
@@ -116,7 +119,9 @@ export class AutoSave<D = ShowDocument> {
 		while (this.#wanted !== this.#saved) {
 			const document = this.#wanted;
 			this.#status = { kind: 'saving' };
-			const answer = await this.#options.send(this.#revision, document);
+			const answer = await this.#options
+				.send(this.#revision, document)
+				.catch((thrown: unknown): SaveAnswer<D> => ({ kind: 'failed', why: unexpected(thrown) }));
 			if (answer.kind !== 'saved') {
 				this.#status = answer;
 				if (answer.kind === 'failed') {

@@ -76,7 +76,7 @@ export function drawChart(
 ): void {
 	const { x, y, at } = placer(field, chart.maxRadius, chart.maxSpeed);
 	const { context } = pen;
-	const small = letter * 0.9;
+	const small = letter;
 	const corner = (azimuth: number, altitude: number): AltAz => ({ azimuth, altitude });
 
 	// A dark ground keeps lines and letters clear of the stars behind them.

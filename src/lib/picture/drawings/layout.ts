@@ -154,7 +154,7 @@ export function layOutDrawings(
 	}
 	if (drawings.scale) {
 		const [low, high] = drawings.scale;
-		const style = { height: letter * 0.9, colour: inks.ink, mono: true } as const;
+		const style = { height: letter, colour: inks.ink, mono: true } as const;
 		const altitude = scale.head + 0.8;
 		put(String(low), { altitude, azimuth: scale.left }, { ...style, align: 'left' });
 		put(`${high} km/s`, { altitude, azimuth: scale.right }, { ...style, align: 'right' });
@@ -163,7 +163,7 @@ export function layOutDrawings(
 	if (withChart) taken.push(chartGround);
 	if (drawings.scale) taken.push(scale);
 	drawings.rings.forEach(({ label }, i) => {
-		const style: TextStyle = { height: letter * 0.9, colour: inks.soft };
+		const style: TextStyle = { height: letter, colour: inks.soft };
 		const made = ringLabel(label, ringPoints[i], style, width, taken);
 		if (!made) return;
 		words.push(made);

@@ -12,6 +12,8 @@ export interface RunListed extends Run {
 	showTitle: string;
 	editionNumber: number;
 	domeName: string;
+	apertureDegrees: number;
+	tiltDegrees: number;
 	startedByName: string | null;
 }
 
@@ -20,6 +22,8 @@ const listed = {
 	showTitle: sql<string>`${editions.content}->'show'->>'title'`,
 	editionNumber: editions.number,
 	domeName: domes.name,
+	apertureDegrees: domes.apertureDegrees,
+	tiltDegrees: domes.tiltDegrees,
 	startedByName: users.name
 };
 

@@ -15,6 +15,7 @@ export const load: PageServerLoad = async ({ locals, params, url }) => {
 	);
 	return {
 		run: { id: run.id, domeName: run.domeName, editionNumber: run.editionNumber },
+		geometry: { apertureDegrees: run.apertureDegrees, tiltDegrees: run.tiltDegrees },
 		content: edition.content,
 		events,
 		reader: ctx.userName,
