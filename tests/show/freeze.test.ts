@@ -53,6 +53,15 @@ describe('findFaults', () => {
 		expect(fault.remedy).toBe('Change it in the script.');
 	});
 
+	it('finds no stars in a galaxy whose only lit component is a point', () => {
+		const [fault] = faultsOf({}, (content) => {
+			content.galaxies[galaxyId].document.model.components = [
+				{ id: 'point', kind: 'point-mass', parameters: { mass: 1e10 }, lit: true }
+			];
+		});
+		expect(fault.what).toContain('no stars to show');
+	});
+
 	it('tries the galaxy at the limits of the live controls, not only at rest', () => {
 		const heavy = (content: EditionContent) => {
 			const halo = content.galaxies[galaxyId].document.model.components.find((c) => !c.lit);

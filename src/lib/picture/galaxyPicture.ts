@@ -1,7 +1,14 @@
 import { massModel } from '../dynamics';
 import type { DomeGeometry } from '../dome/types';
 import type { GalaxyDocument } from '../show/galaxy';
-import { advance, createRingTable, sampleBackground, sampleStars, setModel } from '../starfield';
+import {
+	advance,
+	createRingTable,
+	hasStars,
+	sampleBackground,
+	sampleStars,
+	setModel
+} from '../starfield';
 import type { BackgroundSky, RingTable, StarList } from '../starfield/types';
 import { TICKS_PER_SECOND, timeFromMyr } from '../units';
 import { speedRange } from './speedRange';
@@ -122,7 +129,7 @@ export class GalaxyPicture {
 
 	#sample(): StarList | null {
 		const { model, look } = this.#document;
-		if (!model.components.some((c) => c.lit && (c.factor ?? 1) > 0)) return null;
+		if (!hasStars(model)) return null;
 		const { starCount, seed } = this.#options;
 		return sampleStars(model, look, { count: starCount, seed, radii: this.#rings.radii });
 	}

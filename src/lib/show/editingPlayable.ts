@@ -1,4 +1,5 @@
 import { massModel, ParameterError } from '../dynamics';
+import { hasStars } from '../starfield';
 import type { Scene } from './document';
 import type { EditionContent, EditionGalaxy } from './edition';
 import { effectiveModel, sceneSettings } from './settings';
@@ -18,7 +19,7 @@ export function isPlayable(
 		if (thrown instanceof ParameterError) return false;
 		throw thrown;
 	}
-	return galaxy.document.model.components.some((c) => c.lit && (c.factor ?? 1) > 0);
+	return hasStars(galaxy.document.model);
 }
 
 /**

@@ -1,6 +1,7 @@
 import { massModel, ParameterError } from '../dynamics';
 import { rangeWords } from '../dynamics/rangeWords';
 import type { MassModel } from '../dynamics/types';
+import { hasStars } from '../starfield';
 import type { LiveControl, Scene } from './document';
 import type { EditionContent, EditionGalaxy } from './edition';
 import { controlRange, targetKey } from './editingControls';
@@ -103,9 +104,9 @@ function modelOf(scene: Scene, galaxy: EditionGalaxy, values: ControlValues): Ma
 function matterFindings(scene: Scene, { document }: EditionGalaxy): Finding[] {
 	const present = document.model.components.filter((c) => (c.factor ?? 1) > 0);
 	const found: Finding[] = [];
-	if (!present.some((c) => c.lit)) {
+	if (!hasStars(document.model)) {
 		found.push({
-			what: `The galaxy “${document.name}” has no lit component, so there are no stars to show.`,
+			what: `The galaxy “${document.name}” has no lit component with an extent, so there are no stars to show.`,
 			remedy: 'Mark one of its components as lit, or choose another galaxy.'
 		});
 	}

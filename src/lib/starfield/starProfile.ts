@@ -1,5 +1,12 @@
 import { massModel, componentKinds } from '../dynamics';
-import type { MassModelSpec } from '../dynamics/types';
+import type { ComponentSpec, MassModelSpec } from '../dynamics/types';
+
+/** Whether a component has stars to show: lit, present, and with an extent. A point has none. */
+const showsStars = ({ kind, lit, factor = 1 }: ComponentSpec): boolean =>
+	lit && factor > 0 && kind !== 'point-mass';
+
+/** Whether a galaxy has any stars to show. */
+export const hasStars = (spec: MassModelSpec): boolean => spec.components.some(showsStars);
 
 /** Where the stars of one lit component are, ring by ring. */
 export interface ComponentProfile {
@@ -30,7 +37,7 @@ export function starProfiles(spec: MassModelSpec, radii: Float64Array): Componen
 	const edges = Float64Array.from({ length: count + 1 }, (_, k) =>
 		k === 0 ? 0 : k === count ? radii[count - 1] : (radii[k - 1] + radii[k]) / 2
 	);
-	const lit = spec.components.filter((c) => c.lit && (c.factor ?? 1) > 0);
+	const lit = spec.components.filter(showsStars);
 	const profiles = lit.map((component) => {
 		const model = massModel({ components: [component] });
 		const weights = new Float64Array(count);

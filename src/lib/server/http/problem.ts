@@ -1,6 +1,7 @@
-import { error, json } from '@sveltejs/kit';
+import { error, isHttpError, isRedirect, json } from '@sveltejs/kit';
 import { isDatabaseAway } from '../db/databaseAway';
 import { isAppError, type ErrorCode } from '../errors';
+import { log } from '../log';
 
 export { isDatabaseAway };
 
@@ -27,6 +28,7 @@ const titleOf: Record<number, string> = {
 	413: 'Too large',
 	422: 'Not possible yet',
 	429: 'Too many tries',
+	500: 'It failed',
 	503: 'The database is away'
 };
 
@@ -42,7 +44,10 @@ export function problem(
 	);
 }
 
-/** For +server.ts: runs a handler and turns coded errors into problem details. Others pass on. */
+/**
+ * For +server.ts: runs a handler and turns whatever fails into problem details; the
+ * unexpected is logged under an id that the answer names.
+ */
 export async function answering(work: () => Promise<Response>): Promise<Response> {
 	try {
 		return await work();
@@ -51,7 +56,12 @@ export async function answering(work: () => Promise<Response>): Promise<Response
 		if (isDatabaseAway(thrown)) {
 			return problem(503, databaseAwayMessage);
 		}
-		throw thrown;
+		// What SvelteKit throws on purpose keeps its status; a redirect goes on its way.
+		if (isRedirect(thrown)) throw thrown;
+		if (isHttpError(thrown)) return problem(thrown.status, thrown.body.message);
+		const id = crypto.randomUUID();
+		log.error({ err: thrown, requestId: id }, 'a request failed');
+		return problem(500, 'Something went wrong on our side. Nothing was changed.', { id });
 	}
 }
 
