@@ -93,6 +93,23 @@ describe('deliverLetter', () => {
 		expect(own.sent).toHaveLength(1);
 	});
 
+	test('sends what a worker claimed and died over, and leaves a fresh claim alone', async () => {
+		const ctx = { ...(await makeVenue(db, ['manager'])), db };
+		const id = await invite(ctx, { email: 'orphan@example.org', roles: ['adviser'] });
+		await sentTo('orphan@example.org');
+		const own = new FakeMailTransport();
+		const claim = (ageSeconds: number) =>
+			db
+				.update(mailsSent)
+				.set({ sentAt: null, claimedAt: new Date(Date.now() - ageSeconds * 1000) })
+				.where(eq(mailsSent.key, `invitation:${id}`));
+		await claim(20);
+		expect(await deliverLetter({ kind: 'invitation', id }, own, db)).toBe(false);
+		await claim(110);
+		expect(await deliverLetter({ kind: 'invitation', id }, own, db)).toBe(true);
+		expect(own.sent).toHaveLength(1);
+	});
+
 	test('sends nothing for an invitation that was withdrawn meanwhile', async () => {
 		const ctx = { ...(await makeVenue(db, ['manager'])), db };
 		const own = new FakeMailTransport();

@@ -17,7 +17,12 @@ export interface MailTransport {
 /** The SMTP server of the environment. */
 export function smtpTransport(): MailTransport {
 	const { SMTP_URL, MAIL_FROM } = environment();
-	const transporter = createTransport(SMTP_URL);
+	const transporter = createTransport({
+		url: SMTP_URL,
+		connectionTimeout: 20_000,
+		greetingTimeout: 20_000,
+		socketTimeout: 40_000
+	});
 	return {
 		async send(mail) {
 			await transporter.sendMail({ from: MAIL_FROM, ...mail });
