@@ -177,7 +177,13 @@ const refused: [string, unknown, (string | number)[], RegExp][] = [
 		['colour'],
 		/no field "colour"/
 	],
-	['another law', specWith({}, { law: 'modified-simple' }), ['law'], /"newton"/],
+	['an unknown law', specWith({}, { law: 'epicurean' }), ['law'], /one of newton, radial-/],
+	[
+		'another law beside a halo',
+		specWith({ lit: false }, { law: 'modified-simple' }),
+		['law'],
+		/explained twice/
+	],
 	['no components', {}, ['components'], /must be a list/],
 	[
 		'too many components',

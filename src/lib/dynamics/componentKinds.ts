@@ -30,6 +30,10 @@ export function isComponentKind(value: unknown): value is ComponentKind {
 	return typeof value === 'string' && Object.hasOwn(makers, value);
 }
 
+/** Every parameter of a set by name: numbers, words and lists. */
+export const parameterNames = (set: ParameterSet): string[] =>
+	[...set.parameters, ...(set.choices ?? []), ...(set.lists ?? [])].map(({ name }) => name);
+
 /**
  * Which way of giving the parameters is meant: the one that shares most names with those given,
  * the first of equals.
@@ -37,6 +41,6 @@ export function isComponentKind(value: unknown): value is ComponentKind {
 export function parameterSetOf(kind: ComponentKind, given: readonly string[]): ParameterSet {
 	const { parameterSets } = makers[kind].info;
 	const shared = (set: ParameterSet) =>
-		set.parameters.filter((parameter) => given.includes(parameter.name)).length;
+		parameterNames(set).filter((name) => given.includes(name)).length;
 	return parameterSets.reduce((best, set) => (shared(set) > shared(best) ? set : best));
 }

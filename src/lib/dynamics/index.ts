@@ -6,6 +6,8 @@ export {
 	type FrequencyTable
 } from './tabulateFrequencies';
 export { componentKinds, isComponentKind, parameterSetOf } from './componentKinds';
+export { accelerationScale, gravityLaws, type LawInfo } from './laws';
+export { numberOf } from './parameterValues';
 export { criticalDensity, nfwHalo, type NfwHalo } from './components/nfwHalo';
 export { orbitTimeMyr, massBreakdown, type MassBreakdown } from './derived';
 export { ParameterError } from './ParameterError';
@@ -14,12 +16,17 @@ export { componentSpecSchema, massModelSpecSchema } from './schema';
 export { milkyWayMcMillan2017, type ShelfGalaxy } from './shelf';
 export type {
 	Acceleration,
+	ChoiceInfo,
 	ComponentKind,
 	ComponentKindInfo,
 	ComponentSpec,
 	FrequencySums,
+	GravityLaw,
+	ListInfo,
 	MassModel,
 	MassModelSpec,
 	ParameterInfo,
-	ParameterSet
+	Parameters,
+	ParameterSet,
+	ParameterValue
 } from './types';

@@ -1,11 +1,14 @@
 import { G } from '../units';
 import { makers, parameterSetOf } from './componentKinds';
+import { boostUnder, pullUnder, sumsUnder } from './laws';
 import { ParameterError } from './ParameterError';
+import { givenNames, numbersOf, wordsAndListsOf } from './parameterValues';
 import { calledBy, factorWords, isWithin, specIssues, specLimits } from './specIssues';
 import type {
 	Acceleration,
 	ComponentSpec,
 	FrequencySums,
+	GravityLaw,
 	MassComponent,
 	MassModel,
 	MassModelSpec
@@ -25,20 +28,17 @@ interface Part {
 export function massModel(spec: MassModelSpec): MassModel {
 	const [issue] = specIssues(spec);
 	if (issue) throw new ParameterError(issue);
-	return new ComposedModel(spec.components.map(makePart));
+	return new ComposedModel(spec.components.map(makePart), spec.law ?? 'newton');
 }
 
 function makePart(spec: ComponentSpec): Part {
-	const set = parameterSetOf(
-		spec.kind,
-		Object.keys(spec.parameters).filter((name) => spec.parameters[name] !== undefined)
-	);
-	const complete = Object.fromEntries(
-		set.parameters.map((info) => [info.name, spec.parameters[info.name] ?? info.initial])
-	);
+	const set = parameterSetOf(spec.kind, givenNames(spec.parameters));
 	return {
 		spec: { ...spec, parameters: { ...spec.parameters } },
-		component: makers[spec.kind].make(complete),
+		component: makers[spec.kind].make(
+			numbersOf(spec.parameters, set),
+			wordsAndListsOf(spec.parameters, set)
+		),
 		factor: spec.factor ?? 1
 	};
 }
@@ -48,9 +48,13 @@ class ComposedModel implements MassModel {
 	/** Those with a factor above 0: what is taken away adds nothing, not even 0 times Infinity. */
 	readonly #present: readonly Part[];
 	readonly #sums: FrequencySums = { omega: 0, kappa: 0, nu: 0 };
+	readonly #pull = { pull: 0, slope: 0 };
 
-	constructor(parts: readonly Part[]) {
+	readonly #law: GravityLaw;
+
+	constructor(parts: readonly Part[], law: GravityLaw) {
 		this.#parts = parts;
+		this.#law = law;
 		this.#present = parts.filter((part) => part.factor > 0);
 	}
 
@@ -60,16 +64,17 @@ class ComposedModel implements MassModel {
 				...spec,
 				parameters: { ...spec.parameters },
 				factor
-			}))
+			})),
+			...(this.#law === 'newton' ? {} : { law: this.#law })
 		};
 	}
 
 	circularVelocity(R: number): number {
-		return Math.sqrt(this.#sum((component) => component.circularVelocitySquared(R)));
+		return Math.sqrt(Math.max(0, this.#speedSquared(R)));
 	}
 
 	circularFrequency(R: number): number {
-		return Math.sqrt(this.#frequencies(R, 0).omega);
+		return Math.sqrt(Math.max(0, this.#frequencies(R, 0).omega));
 	}
 
 	epicycleFrequency(R: number): number {
@@ -81,9 +86,14 @@ class ComposedModel implements MassModel {
 	}
 
 	addFrequenciesSquared(R: number, sheetHeight: number, sums: FrequencySums): void {
-		for (const { component, factor } of this.#present) {
-			component.addFrequenciesSquared(R, factor, sheetHeight, sums);
+		if (this.#law === 'newton') {
+			this.#addNewton(R, sheetHeight, sums);
+			return;
 		}
+		const own = this.#frequencies(R, sheetHeight);
+		sums.omega += own.omega;
+		sums.kappa += own.kappa;
+		sums.nu += own.nu;
 	}
 
 	enclosedMass(r: number): number {
@@ -93,10 +103,11 @@ class ComposedModel implements MassModel {
 	dynamicalMass(R: number): number {
 		// In the limit R = 0 only a point mass is left, and it is its own dynamical mass.
 		if (R === 0) return this.enclosedMass(0);
-		return (this.#sum((component) => component.circularVelocitySquared(R)) * R) / G;
+		return (this.#speedSquared(R) * R) / G;
 	}
 
 	potential(R: number, z: number): number {
+		if (this.#law !== 'newton') return NaN;
 		return this.#sum((component) => component.potential(R, z));
 	}
 
@@ -105,6 +116,12 @@ class ComposedModel implements MassModel {
 		out.z = 0;
 		for (const { component, factor } of this.#present) {
 			component.addAcceleration(R, z, factor, out);
+		}
+		const pull = Math.hypot(out.R, out.z);
+		if (this.#law !== 'newton' && pull > 0) {
+			const boost = boostUnder(this.#law, pull);
+			out.R *= boost;
+			out.z *= boost;
 		}
 		return out;
 	}
@@ -118,17 +135,24 @@ class ComposedModel implements MassModel {
 	}
 
 	escapeVelocity(R: number): number {
+		if (this.#law !== 'newton') return Infinity;
 		if (this.#present.some(({ component }) => !component.escapable)) return Infinity;
 		// 0 − x, because −2 times nothing would be −0.
 		return Math.sqrt(0 - 2 * this.potential(R, 0));
 	}
 
 	lit(): MassModel {
-		return new ComposedModel(this.#parts.filter(({ spec }) => spec.lit));
+		return new ComposedModel(
+			this.#parts.filter(({ spec }) => spec.lit),
+			this.#law
+		);
 	}
 
 	unlit(): MassModel {
-		return new ComposedModel(this.#parts.filter(({ spec }) => !spec.lit));
+		return new ComposedModel(
+			this.#parts.filter(({ spec }) => !spec.lit),
+			this.#law
+		);
 	}
 
 	withFactor(componentId: string, factor: number): MassModel {
@@ -160,7 +184,8 @@ class ComposedModel implements MassModel {
 					max: specLimits.factor.max,
 					message: factorWords(calledBy(part.spec))
 				});
-			})
+			}),
+			this.#law
 		);
 	}
 
@@ -175,7 +200,21 @@ class ComposedModel implements MassModel {
 		sums.omega = 0;
 		sums.kappa = 0;
 		sums.nu = 0;
-		this.addFrequenciesSquared(R, sheetHeight, sums);
+		this.#addNewton(R, sheetHeight, sums);
+		sumsUnder(this.#law, R, sums);
 		return sums;
+	}
+
+	#addNewton(R: number, sheetHeight: number, sums: FrequencySums): void {
+		for (const { component, factor } of this.#present) {
+			component.addFrequenciesSquared(R, factor, sheetHeight, sums);
+		}
+	}
+
+	/** v² under the model's law; negative where the net pull is outward. */
+	#speedSquared(R: number): number {
+		const newton = this.#sum((component) => component.circularVelocitySquared(R));
+		if (this.#law === 'newton' || !(newton > 0) || R === 0) return newton;
+		return R * pullUnder(this.#law, newton / R, this.#pull).pull;
 	}
 }

@@ -1,6 +1,9 @@
-import { isComponentKind, makers, parameterSetOf } from './componentKinds';
+import { isComponentKind, makers, parameterNames, parameterSetOf } from './componentKinds';
+import { gravityLaws } from './laws';
+import { givenNames } from './parameterValues';
 import { rangeWords } from './rangeWords';
 import type { ComponentKind, ParameterInfo } from './types';
+import { wordAndListIssues } from './wordAndListIssues';
 
 /** One fault of a mass model, in plain words, with the place it is at. */
 export interface SpecIssue {
@@ -43,14 +46,15 @@ export function specIssues(value: unknown): SpecIssue[] {
 			parameter: field,
 			message: `A mass model has no field "${field}"; take it out.`
 		}));
-	if (value.law !== undefined && value.law !== 'newton') {
+	const { components, law } = value;
+	const known = gravityLaws.find((info) => info.law === law);
+	if (law !== undefined && !known) {
 		issues.push({
 			path: ['law'],
 			parameter: 'law',
-			message: 'The law must be "newton", the only one in this version.'
+			message: `The law must be one of ${gravityLaws.map((info) => info.law).join(', ')}.`
 		});
 	}
-	const { components } = value;
 	if (!Array.isArray(components) || components.length > specLimits.components) {
 		issues.push({
 			path: ['components'],
@@ -58,6 +62,13 @@ export function specIssues(value: unknown): SpecIssue[] {
 			message: `Components must be a list of at most ${specLimits.components}.`
 		});
 		return issues;
+	}
+	if (known && known.law !== 'newton' && components.some((c) => isRecord(c) && c.lit === false)) {
+		issues.push({
+			path: ['law'],
+			parameter: 'law',
+			message: `${known.label} takes the place of unlit matter, so it acts on lit matter alone: with a halo the same speeds would be explained twice. Take the unlit components out, or choose Newton’s law.`
+		});
 	}
 	const ids = new Set<unknown>();
 	components.forEach((component: unknown, index) => {
@@ -126,15 +137,17 @@ function parameterIssues(
 	called: string
 ): SpecIssue[] {
 	// A key that is there without a value is missing.
-	const given = Object.keys(parameters).filter((name) => parameters[name] !== undefined);
+	const given = givenNames(parameters);
 	const set = parameterSetOf(kind, given);
+	const known = parameterNames(set);
 	const issues: SpecIssue[] = given
-		.filter((name) => !set.parameters.some((info) => info.name === name))
+		.filter((name) => !known.includes(name))
 		.map((name) => ({
 			path: ['parameters', name],
 			parameter: name,
-			message: `${called} has no parameter "${name}"; it takes ${set.parameters.map((info) => info.name).join(', ')}.`
+			message: `${called} has no parameter "${name}"; it takes ${known.join(', ')}.`
 		}));
+	issues.push(...wordAndListIssues(set, parameters, called));
 	for (const info of set.parameters) {
 		const value = parameters[info.name];
 		if (value === undefined ? info.optional : isWithin(value, info)) continue;

@@ -30,7 +30,7 @@ export function tabulateFrequencies(
 		sums.kappa = 0;
 		sums.nu = 0;
 		model.addFrequenciesSquared(radii[i], sheetHeight, sums);
-		omega[i] = Math.sqrt(sums.omega);
+		omega[i] = Math.sqrt(Math.max(0, sums.omega));
 		kappa[i] = Math.sqrt(sums.kappa);
 		nu[i] = Math.sqrt(sums.nu);
 	}

@@ -10,6 +10,10 @@ export type ComponentKind =
 	| 'pseudo-isothermal'
 	| 'burkert';
 
+/** A number, a choice by its name (such as "sech2"), or a list of numbers. */
+export type ParameterValue = number | string | readonly number[];
+export type Parameters = Record<string, ParameterValue>;
+
 export interface ComponentSpec {
 	/** Stable within the model; live controls refer to it. */
 	id: string;
@@ -17,7 +21,7 @@ export interface ComponentSpec {
 	/** What people call it, such as "Stellar disc". The core does not read it. */
 	name?: string;
 	/** By the names in `componentKinds`; kpc, km/s, Msun and combinations. */
-	parameters: Record<string, number>;
+	parameters: Parameters;
 	/** true for stars and gas, false for a halo. */
 	lit: boolean;
 	/** Multiplies the component's mass; 0 takes it away. 1 where missing. */
@@ -26,9 +30,11 @@ export interface ComponentSpec {
 
 export interface MassModelSpec {
 	components: ComponentSpec[];
-	/** Only Newton's law is computed in this version. */
-	law?: 'newton';
+	/** How the pull follows from the matter; Newton's where missing. Others take lit matter only. */
+	law?: GravityLaw;
 }
+
+export type GravityLaw = 'newton' | 'radial-acceleration' | 'modified-simple' | 'modified-standard';
 
 /** Acceleration in the meridional plane, (km/s)²/kpc; negative is inward (R) and downward (z). */
 export interface Acceleration {
@@ -75,9 +81,9 @@ export interface MassComponent {
 
 export interface MassModel {
 	readonly spec: MassModelSpec;
-	/** km/s at cylindrical radius R (kpc) in the plane; NaN where the net pull is outward. */
+	/** km/s at cylindrical radius R (kpc) in the plane; 0 where the net pull is outward. */
 	circularVelocity(R: number): number;
-	/** Ω, km/s/kpc. */
+	/** Ω, km/s/kpc; 0 where the net pull is outward. */
 	circularFrequency(R: number): number;
 	/** κ, km/s/kpc; NaN where κ² is negative (circular orbits are unstable there). */
 	epicycleFrequency(R: number): number;
@@ -92,7 +98,7 @@ export interface MassModel {
 	enclosedMass(r: number): number;
 	/** v²R/G, Msun: the mass a spherical body would need for the same speed. */
 	dynamicalMass(R: number): number;
-	/** (km/s)². */
+	/** (km/s)². NaN under a law other than Newton's: it gives pulls, not a potential. */
 	potential(R: number, z: number): number;
 	/** (km/s)²/kpc, written to `out` and returned. */
 	acceleration(R: number, z: number, out: Acceleration): Acceleration;
@@ -100,7 +106,7 @@ export interface MassModel {
 	density(R: number, z: number): number;
 	/** Msun/kpc² lying exactly in the plane: the razor-thin discs. */
 	sheetDensity(R: number): number;
-	/** km/s in the plane; Infinity where nothing escapes. */
+	/** km/s in the plane; Infinity where nothing escapes, as under every law but Newton's. */
 	escapeVelocity(R: number): number;
 	/** The same model with the lit components only. Cheap: nothing is computed anew. */
 	lit(): MassModel;
@@ -136,11 +142,41 @@ export interface ParameterInfo {
 	help: string;
 }
 
+/** A parameter that is one of a few words. It may be left out; `initial` then stands. */
+export interface ChoiceInfo {
+	name: string;
+	label: string;
+	options: { value: string; label: string }[];
+	initial: string;
+	help: string;
+}
+
+/** A parameter that is a list of numbers; always asked for. */
+export interface ListInfo {
+	name: string;
+	label: string;
+	unit: string;
+	/** Limits of each number, both allowed. */
+	min: number;
+	max: number;
+	/** Fewest and most numbers. */
+	least: number;
+	most: number;
+	/** Each number must be above the one before it. */
+	rising: boolean;
+	/** Name of another list that must be as long. */
+	asLongAs?: string;
+	help: string;
+}
+
 export interface ParameterSet {
 	/** Such as "density" or "mass200": which way of giving the parameters this is. */
 	id: string;
 	label: string;
+	/** Those that are numbers, in the order a form asks. */
 	parameters: ParameterInfo[];
+	choices?: ChoiceInfo[];
+	lists?: ListInfo[];
 }
 
 export interface ComponentKindInfo {

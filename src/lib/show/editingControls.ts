@@ -1,4 +1,4 @@
-import { parameterSetOf } from '../dynamics';
+import { numberOf, parameterSetOf } from '../dynamics';
 import type { ComponentSpec, ParameterInfo } from '../dynamics/types';
 import type { ControlTarget, Scene } from './document';
 import type { GalaxyDocument } from './galaxy';
@@ -96,7 +96,8 @@ export function targetValue(
 	if (target.kind === 'star-factor') return scene.mix.starFactor;
 	const component = galaxy?.model.components.find((c) => c.id === target.componentId);
 	const info = component && movableParameters(component).find((p) => p.name === target.parameter);
-	return component?.parameters[target.parameter] ?? info?.initial ?? 0;
+	const own = component && numberOf(component.parameters, target.parameter);
+	return own ?? info?.initial ?? 0;
 }
 
 /** Two targets are the same where one control would hide the other. */

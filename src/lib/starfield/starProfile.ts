@@ -1,4 +1,4 @@
-import { massModel, componentKinds } from '../dynamics';
+import { massModel, componentKinds, numberOf } from '../dynamics';
 import type { ComponentSpec, MassModelSpec } from '../dynamics/types';
 
 /** Whether a component has stars to show: lit, present, and with an extent. A point has none. */
@@ -49,7 +49,7 @@ export function starProfiles(spec: MassModelSpec, radii: Float64Array): Componen
 		}
 		return {
 			disc: componentKinds.find((info) => info.kind === component.kind)?.shape === 'disc',
-			scaleHeight: component.parameters.scaleHeight ?? 0,
+			scaleHeight: numberOf(component.parameters, 'scaleHeight') ?? 0,
 			weights
 		};
 	});

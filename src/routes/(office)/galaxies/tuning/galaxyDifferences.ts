@@ -1,4 +1,5 @@
 import { canonicalJson } from '$lib/show/hash';
+import type { ParameterValue } from '$lib/dynamics';
 import type { GalaxyDocument } from '$lib/show/galaxy';
 
 /** One place where two versions of a galaxy differ, each in words. */
@@ -10,6 +11,12 @@ export interface GalaxyDifference {
 
 const same = (a: unknown, b: unknown) => canonicalJson(a) === canonicalJson(b);
 const number = (value: number) => Number(value.toPrecision(4)).toString();
+const value = (given: ParameterValue) =>
+	typeof given === 'number'
+		? number(given)
+		: typeof given === 'string'
+			? given
+			: `${given.length} numbers`;
 
 /** Every difference of two versions, component by component, in the order of the page. */
 export function galaxyDifferences(
@@ -39,11 +46,11 @@ export function galaxyDifferences(
 		text(`${name}: kind`, a.kind, b.kind);
 		for (const key of new Set([...Object.keys(a.parameters), ...Object.keys(b.parameters)])) {
 			const [left, right] = [a.parameters[key], b.parameters[key]];
-			if (left === right) continue;
+			if (same(left, right)) continue;
 			text(
 				`${name}: ${key}`,
-				left === undefined ? 'not given' : number(left),
-				right === undefined ? 'not given' : number(right)
+				left === undefined ? 'not given' : value(left),
+				right === undefined ? 'not given' : value(right)
 			);
 		}
 	}

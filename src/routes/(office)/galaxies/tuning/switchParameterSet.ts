@@ -1,4 +1,5 @@
 import { nfwHalo, parameterSetOf } from '$lib/dynamics';
+import { numbersOf } from '$lib/dynamics/parameterValues';
 import { nfwMassFunction } from '$lib/dynamics/components/nfwHalo';
 import type { ComponentSpec, ParameterSet } from '$lib/dynamics/types';
 
@@ -36,8 +37,9 @@ export function switchParameterSet(
 	component: ComponentSpec,
 	to: ParameterSet
 ): Record<string, number> | null {
-	const { kind, parameters } = component;
-	const from = parameterSetOf(kind, Object.keys(parameters));
+	const { kind } = component;
+	const from = parameterSetOf(kind, Object.keys(component.parameters));
+	const parameters = numbersOf(component.parameters, from);
 	if (from.id === to.id) return parameters;
 	if (kind !== 'nfw') return null;
 	if (to.id === 'density') {
