@@ -166,6 +166,8 @@ export interface ListInfo {
 	rising: boolean;
 	/** Name of another list that must be as long. */
 	asLongAs?: string;
+	/** A sensible list to begin with. */
+	initial: readonly number[];
 	help: string;
 }
 
