@@ -73,3 +73,23 @@ describe('Tuning', () => {
 		expect(tuning.radii.at(-1)).toBeGreaterThan(40);
 	});
 });
+
+describe('another law', () => {
+	it('takes unlit matter out, leaves no way to mark matter unlit, and one undo brings both back', () => {
+		const { tuning, told } = makeTuning();
+		const before = tuning.document;
+		const litOf = (document: typeof before) => document.model.components.filter((c) => c.lit);
+		expect(litOf(before).length).toBeLessThan(before.model.components.length);
+		tuning.changeLaw('modified-simple');
+		expect(tuning.document.model).toEqual({ components: litOf(before), law: 'modified-simple' });
+		expect(tuning.litOnly).toBe(true);
+		expect(told).toEqual(['Unlit matter was taken out']);
+		expect(tuning.model.circularVelocity(20)).toBeGreaterThan(tuning.newton.circularVelocity(20));
+		const names = tuning.curves.map(({ key, name }) => `${key} ${name}`);
+		expect(names).toContain('+total By this law');
+		expect(names).toContain('+lit Lit, Newton’s law');
+		tuning.undo();
+		expect(tuning.document).toEqual(before);
+		expect(tuning.litOnly).toBe(false);
+	});
+});

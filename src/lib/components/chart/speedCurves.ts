@@ -1,4 +1,4 @@
-import { massModel, rotationCurve } from '$lib/dynamics';
+import { gravityLaws, massModel, rotationCurve } from '$lib/dynamics';
 import type { MassModel, MassModelSpec } from '$lib/dynamics/types';
 
 /** One line of the speed chart. */
@@ -19,7 +19,8 @@ export const chartRadii = (outer: number, count = 240): Float64Array =>
 
 /**
  * Every component by itself, lit and unlit matter together where there are several of them, and
- * the total; in the order they are drawn.
+ * the total; in the order they are drawn. Under another law than Newton's only the total follows
+ * it: the others show what the matter does by Newton's.
  */
 export function speedCurves(
 	spec: MassModelSpec,
@@ -34,6 +35,8 @@ export function speedCurves(
 		sum: false,
 		speeds: speeds(massModel({ components: [component] }))
 	}));
+	const law = gravityLaws.find((info) => info.law === spec.law);
+	const other = law !== undefined && law.law !== 'newton';
 	const several = (lit: boolean) => spec.components.filter((c) => c.lit === lit).length > 1;
 	if (several(false)) {
 		curves.push({
@@ -44,17 +47,23 @@ export function speedCurves(
 			speeds: speeds(model.unlit())
 		});
 	}
-	if (several(true)) {
+	if (several(true) || (other && curves.length > 0)) {
 		curves.push({
 			key: '+lit',
-			name: 'Lit matter',
+			name: other ? 'Lit, Newton’s law' : 'Lit matter',
 			role: 'lit',
 			sum: true,
-			speeds: speeds(model.lit())
+			speeds: speeds(other ? massModel({ components: spec.components }) : model.lit())
 		});
 	}
 	if (spec.components.length > 0) {
-		curves.push({ key: '+total', name: 'Total', role: 'total', sum: true, speeds: speeds(model) });
+		curves.push({
+			key: '+total',
+			name: other ? 'By this law' : 'Total',
+			role: 'total',
+			sum: true,
+			speeds: speeds(model)
+		});
 	}
 	return curves;
 }

@@ -1,6 +1,6 @@
 import { createContext } from 'svelte';
 import { componentKinds, massModel } from '$lib/dynamics';
-import type { ComponentKindInfo, ComponentSpec } from '$lib/dynamics/types';
+import type { ComponentKindInfo, ComponentSpec, GravityLaw } from '$lib/dynamics/types';
 import { chartRadii, speedCurves } from '$lib/components/chart/speedCurves';
 import type { MeasuredPoint } from '$lib/measurements/types';
 import { newId } from '$lib/show/editing';
@@ -38,6 +38,12 @@ export class Tuning {
 	/** kpc; what every read-out is for. */
 	readonly reading = $derived.by(() => this.looked ?? this.document.readingRadius);
 	readonly model = $derived.by(() => massModel(this.document.model));
+	/** The same matter under Newton's law: there pulls of components add. */
+	readonly newton = $derived.by(() => massModel({ components: this.document.model.components }));
+	/** Whether the law leaves no room for unlit matter, and why. */
+	readonly litOnly = $derived.by(() => (this.document.model.law ?? 'newton') !== 'newton');
+	readonly litOnlyWhy =
+		'Under this law lit matter does all the pulling. Choose Newton’s law to add unlit matter.';
 	/** kpc: the chart's right end, with room for the outermost measured point. */
 	readonly outer = $derived.by(() =>
 		this.points.reduce(
@@ -93,9 +99,12 @@ export class Tuning {
 			id: newId(),
 			kind: info.kind,
 			name: info.label,
-			parameters: Object.fromEntries(
-				set.parameters.filter((p) => !p.optional).map((p) => [p.name, p.initial])
-			),
+			parameters: {
+				...Object.fromEntries(
+					set.parameters.filter((p) => !p.optional).map((p) => [p.name, p.initial])
+				),
+				...Object.fromEntries((set.lists ?? []).map((list) => [list.name, [...list.initial]]))
+			},
 			lit: info.lit
 		};
 		const { components } = this.document.model;
@@ -109,6 +118,19 @@ export class Tuning {
 			label
 		);
 		this.#options.ontold(label, true);
+	}
+
+	/** Under a law other than Newton's unlit matter is taken out: it acts on lit matter alone. */
+	changeLaw(law: GravityLaw): void {
+		const { components } = this.document.model;
+		const model =
+			law === 'newton'
+				? { components }
+				: { components: components.filter((component) => component.lit), law };
+		this.change({ ...this.document, model }, 'Changed the law');
+		if (model.components.length < components.length) {
+			this.#options.ontold('Unlit matter was taken out', true);
+		}
 	}
 
 	/** Where the reading line rests, kpc. */
