@@ -1,5 +1,6 @@
 import { index, integer, jsonb, pgTable, text, uuid } from 'drizzle-orm/pg-core';
 import type { GalaxyDocument } from '../../../show/galaxy';
+import type { FitRecord } from '../../../measurements/fitRecord';
 import type { MeasuredPoint } from '../../../measurements/types';
 import { createdAt, id, moment, updatedAt } from '../columns';
 import { users, venues } from './people';
@@ -42,4 +43,26 @@ export const measurements = pgTable(
 		createdBy: uuid().references(() => users.id, { onDelete: 'set null' })
 	},
 	(t) => [index('measurements_galaxy').on(t.galaxyId)]
+);
+
+/** A fit that was kept: data, settings and result as they were. Never changed. */
+export const fits = pgTable(
+	'fits',
+	{
+		id: id(),
+		venueId: uuid()
+			.notNull()
+			.references(() => venues.id, { onDelete: 'cascade' }),
+		galaxyId: uuid()
+			.notNull()
+			.references(() => galaxies.id, { onDelete: 'cascade' }),
+		measurementsId: uuid().references(() => measurements.id, { onDelete: 'set null' }),
+		name: text().notNull(),
+		record: jsonb().$type<FitRecord>().notNull(),
+		createdAt: createdAt(),
+		createdBy: uuid().references(() => users.id, { onDelete: 'set null' }),
+		/** Put away by a person; still to be read by whoever has its address. */
+		archivedAt: moment()
+	},
+	(t) => [index('fits_galaxy').on(t.galaxyId)]
 );
