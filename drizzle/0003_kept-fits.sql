@@ -6,8 +6,7 @@ CREATE TABLE "fits" (
 	"name" text NOT NULL,
 	"record" jsonb NOT NULL,
 	"created_at" timestamp with time zone DEFAULT now() NOT NULL,
-	"created_by" uuid,
-	"archived_at" timestamp with time zone
+	"created_by" uuid
 );
 --> statement-breakpoint
 ALTER TABLE "fits" ADD CONSTRAINT "fits_venue_id_venues_id_fk" FOREIGN KEY ("venue_id") REFERENCES "public"."venues"("id") ON DELETE cascade ON UPDATE no action;--> statement-breakpoint

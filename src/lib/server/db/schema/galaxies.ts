@@ -60,9 +60,7 @@ export const fits = pgTable(
 		name: text().notNull(),
 		record: jsonb().$type<FitRecord>().notNull(),
 		createdAt: createdAt(),
-		createdBy: uuid().references(() => users.id, { onDelete: 'set null' }),
-		/** Put away by a person; still to be read by whoever has its address. */
-		archivedAt: moment()
+		createdBy: uuid().references(() => users.id, { onDelete: 'set null' })
 	},
 	(t) => [index('fits_galaxy').on(t.galaxyId)]
 );
