@@ -58,13 +58,12 @@ export async function copyGalaxy(
 		const from = await findGalaxy(tx, ctx, id);
 		const copy = given ?? { ...from.document, name: `${from.name.slice(0, 113)} (copy)` };
 		const made = await insertGalaxy(tx, ctx, copy, 'galaxy.copy', { from: id });
-		for (const { name, source, rows } of await measurementsOf(tx, id)) {
+		for (const { id: _, rows, ...table } of await measurementsOf(tx, id)) {
 			await tx.insert(measurements).values({
+				...table,
+				rows: [...rows],
 				venueId: ctx.venueId,
 				galaxyId: made,
-				name,
-				source,
-				rows,
 				createdBy: ctx.userId
 			});
 		}

@@ -1,18 +1,17 @@
 import { asc, eq } from 'drizzle-orm';
 import { z } from 'zod';
-import type { MeasuredPoint } from '../../measurements/types';
+import type { MeasuredRows } from '../../measurements/types';
 import { audit, inTransaction, queryable, requireRole, type Context } from '../context';
 import type { Queryable } from '../db/database';
 import { measurements } from '../db/schema';
 import { AppError } from '../errors';
 import { findGalaxy } from './findGalaxy';
 
-export interface MeasurementTable {
+export interface MeasurementTable extends MeasuredRows {
 	id: string;
 	name: string;
 	/** Citation, or a plain statement that the points are invented. */
 	source: string;
-	rows: MeasuredPoint[];
 }
 
 const tableSchema = z.strictObject({
@@ -40,7 +39,11 @@ export const measurementsOf = (tx: Queryable, galaxyId: string): Promise<Measure
 			id: measurements.id,
 			name: measurements.name,
 			source: measurements.source,
-			rows: measurements.rows
+			rows: measurements.rows,
+			radiusUnit: measurements.radiusUnit,
+			speedUnit: measurements.speedUnit,
+			distance: measurements.distance,
+			inclination: measurements.inclination
 		})
 		.from(measurements)
 		.where(eq(measurements.galaxyId, galaxyId))

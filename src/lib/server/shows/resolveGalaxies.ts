@@ -1,6 +1,8 @@
 import { and, asc, eq, inArray, isNull, or } from 'drizzle-orm';
 import type { ShowDocument } from '../../show/document';
 import type { EditionGalaxy } from '../../show/edition';
+import { measuredPoints } from '../../measurements/measuredPoints';
+import type { MeasuredPoint, MeasuredRows } from '../../measurements/types';
 import type { Queryable } from '../db/database';
 import { galaxies, measurements } from '../db/schema';
 
@@ -17,6 +19,12 @@ export const galaxyIdsOf = (document: ShowDocument): string[] => [
 		document.scenes.flatMap(({ subject }) => (subject.kind === 'galaxy' ? [subject.galaxyId] : []))
 	)
 ];
+
+/** What an edition needs of a table: kpc and km/s, without what was left out. */
+const pointsThatCount = (table: MeasuredRows): MeasuredPoint[] =>
+	measuredPoints(table)
+		.filter(({ leftOut }) => leftOut === undefined)
+		.map(({ radius, speed, error }) => ({ radius, speed, error }));
 
 /**
  * Galaxies of one venue as an edition holds them. Where a galaxy has several tables of measured
@@ -56,7 +64,7 @@ export async function resolveGalaxies(
 		const table = tables.find((t) => t.galaxyId === row.id);
 		resolved.galaxies[row.id] = {
 			document: row.document,
-			measured: table?.rows ?? [],
+			measured: table ? pointsThatCount(table) : [],
 			measuredSource: table?.source ?? ''
 		};
 	}

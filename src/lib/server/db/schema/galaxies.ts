@@ -1,7 +1,7 @@
 import { index, integer, jsonb, pgTable, text, uuid } from 'drizzle-orm/pg-core';
 import type { GalaxyDocument } from '../../../show/galaxy';
 import type { FitRecord } from '../../../measurements/fitRecord';
-import type { MeasuredPoint } from '../../../measurements/types';
+import type { Measured, MeasuredPoint, RadiusUnit, SpeedUnit } from '../../../measurements/types';
 import { createdAt, id, moment, updatedAt } from '../columns';
 import { users, venues } from './people';
 
@@ -38,7 +38,14 @@ export const measurements = pgTable(
 		name: text().notNull(),
 		/** Citation, or for invented data a plain statement that it is invented. */
 		source: text().notNull(),
+		/** In the units below, as they came. */
 		rows: jsonb().$type<MeasuredPoint[]>().notNull(),
+		radiusUnit: text().$type<RadiusUnit>().notNull().default('kpc'),
+		speedUnit: text().$type<SpeedUnit>().notNull().default('km/s'),
+		/** Mpc. */
+		distance: jsonb().$type<Measured>(),
+		/** Degrees, 90 is edge-on. */
+		inclination: jsonb().$type<Measured>(),
 		createdAt: createdAt(),
 		createdBy: uuid().references(() => users.id, { onDelete: 'set null' })
 	},

@@ -1,9 +1,9 @@
 import { json } from '@sveltejs/kit';
-import { AppError } from '$lib/server/errors';
 import { copyGalaxy, saveGalaxy } from '$lib/server/galaxies';
 import { answering } from '$lib/server/http/problem';
 import { readJson } from '$lib/server/http/readJson';
 import { contextOf } from '$lib/server/http/contextOf';
+import { onlyFields } from '$lib/server/http/onlyFields';
 import type { RequestHandler } from './$types';
 
 /** Largest galaxy taken; 32 components with long sources fit many times over. */
@@ -12,18 +12,11 @@ const limit = {
 	words: 'A galaxy may have at most 256 kB. Nothing was saved.'
 };
 
-const only = (body: Record<string, unknown>, known: string[]) => {
-	const [odd] = Object.keys(body).filter((key) => !known.includes(key));
-	if (odd === undefined) return;
-	const issues = [{ path: odd, message: 'There is no such field here.' }];
-	throw new AppError('invalid', `Nothing was saved: there is no field “${odd}” here.`, { issues });
-};
-
 /** Saves: {baseRevision, document} → {revision, at}; 409 carries theirs, revision, by and at. */
 export const PUT: RequestHandler = ({ locals, params, request }) =>
 	answering(async () => {
 		const body = await readJson(request, limit);
-		only(body, ['baseRevision', 'document']);
+		onlyFields(body, ['baseRevision', 'document']);
 		const { baseRevision, document } = body;
 		return json(await saveGalaxy(contextOf(locals), { id: params.id, baseRevision, document }));
 	});
@@ -32,7 +25,7 @@ export const PUT: RequestHandler = ({ locals, params, request }) =>
 export const POST: RequestHandler = ({ locals, params, request }) =>
 	answering(async () => {
 		const body = await readJson(request, limit);
-		only(body, ['document']);
+		onlyFields(body, ['document']);
 		const document = body.document ?? null;
 		const id = await copyGalaxy(contextOf(locals), { id: params.id, document });
 		return json({ id }, { status: 201 });
