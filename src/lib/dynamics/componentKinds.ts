@@ -1,13 +1,21 @@
 import { burkert } from './components/burkert';
 import type { ComponentMaker } from './components/ComponentMaker';
+import { dehnen } from './components/dehnen';
+import { doublePowerLaw } from './components/doublePowerLaw';
+import { einasto } from './components/einasto';
 import { exponentialDisk } from './components/exponentialDisk';
 import { hernquist } from './components/hernquist';
+import { isochrone } from './components/isochrone';
+import { jaffe } from './components/jaffe';
 import { kuzminDisk } from './components/kuzminDisk';
+import { logarithmic } from './components/logarithmic';
 import { miyamotoNagai } from './components/miyamotoNagai';
 import { nfw } from './components/nfw';
 import { plummer } from './components/plummer';
 import { pointMass } from './components/pointMass';
 import { pseudoIsothermal } from './components/pseudoIsothermal';
+import { sersic } from './components/sersic';
+import { tabulated } from './components/tabulated';
 import type { ComponentKind, ComponentKindInfo, ParameterSet } from './types';
 
 /** Every kind with its maker. A new kind is one line here and one in `ComponentKind`. */
@@ -16,11 +24,19 @@ export const makers: Record<ComponentKind, ComponentMaker> = {
 	'miyamoto-nagai': miyamotoNagai,
 	'kuzmin-disk': kuzminDisk,
 	hernquist,
+	sersic,
 	plummer,
+	jaffe,
+	dehnen,
+	isochrone,
 	'point-mass': pointMass,
+	tabulated,
 	nfw,
 	'pseudo-isothermal': pseudoIsothermal,
-	burkert
+	burkert,
+	einasto,
+	'double-power-law': doublePowerLaw,
+	logarithmic
 };
 
 /** What forms are built from: every kind, in the order people should meet them. */

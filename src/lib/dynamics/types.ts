@@ -8,7 +8,15 @@ export type ComponentKind =
 	| 'kuzmin-disk'
 	| 'nfw'
 	| 'pseudo-isothermal'
-	| 'burkert';
+	| 'burkert'
+	| 'jaffe'
+	| 'isochrone'
+	| 'dehnen'
+	| 'sersic'
+	| 'einasto'
+	| 'double-power-law'
+	| 'logarithmic'
+	| 'tabulated';
 
 /** A number, a choice by its name (such as "sech2"), or a list of numbers. */
 export type ParameterValue = number | string | readonly number[];
