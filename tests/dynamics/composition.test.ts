@@ -6,12 +6,19 @@ import {
 	orbitTimeMyr,
 	rotationCurve,
 	tabulateFrequencies,
+	type MassModel,
 	type MassModelSpec
 } from '../../src/lib/dynamics/index';
 import { G } from '../../src/lib/units';
 import { near } from './near';
 import { oneComponent } from './oneComponent';
 import { anyComponent, anySpec } from './randomSpecs';
+
+const squares = (model: MassModel, R: number) => {
+	const sums = { omega: 0, kappa: 0, nu: 0 };
+	model.addFrequenciesSquared(R, 0.3, sums);
+	return sums;
+};
 
 const anyRadius = fc.double({ min: -4, max: 4, noNaN: true }).map((t) => 10 ** t);
 
@@ -27,16 +34,13 @@ test('a model is the sum of its components', () => {
 				sum((p) => p.circularVelocity(R) ** 2),
 				1e-12
 			);
-			near(
-				model.epicycleFrequency(R) ** 2,
-				sum((p) => p.epicycleFrequency(R) ** 2),
-				1e-12
-			);
-			near(
-				model.verticalFrequency(R, 0.3) ** 2,
-				sum((p) => p.verticalFrequency(R, 0.3) ** 2),
-				1e-12
-			);
+			const whole = squares(model, R);
+			const partly = parts.map((part) => squares(part, R));
+			for (const name of ['omega', 'kappa', 'nu'] as const) {
+				const size = partly.reduce((total, one) => total + Math.abs(one[name]), 0);
+				const added = partly.reduce((total, one) => total + one[name], 0);
+				near(whole[name] + size, added + size, 1e-12, name);
+			}
 			near(
 				model.enclosedMass(R),
 				sum((p) => p.enclosedMass(R)),
@@ -83,9 +87,12 @@ test('over all allowed parameters speeds are numbers and stable orbits have freq
 			expect(model.circularVelocity(R)).toBeGreaterThan(0);
 			expect(model.circularVelocity(R)).toBeLessThan(Infinity);
 			near(model.circularFrequency(R) * R, model.circularVelocity(R), 1e-12);
-			const ratio = model.epicycleFrequency(R) / model.circularFrequency(R);
-			expect(ratio).toBeGreaterThan(0.5);
-			expect(ratio).toBeLessThanOrEqual(2 + 1e-9);
+			// A table may fall as fast as it likes; every other shape has stable orbits everywhere.
+			if (component.kind !== 'tabulated') {
+				const ratio = model.epicycleFrequency(R) / model.circularFrequency(R);
+				expect(ratio).toBeGreaterThan(0.5);
+				expect(ratio).toBeLessThanOrEqual(2 + 1e-9);
+			}
 			expect(model.verticalFrequency(R, 0.3)).toBeGreaterThan(0);
 			expect(model.enclosedMass(R)).toBeGreaterThan(0);
 			expect(Number.isFinite(model.potential(R, 0.3))).toBe(true);

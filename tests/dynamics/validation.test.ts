@@ -321,14 +321,22 @@ test('whatever is broken, schema and massModel agree', () => {
 test('every kind describes its parameters fully, and its initial values make a model', () => {
 	expect(componentKinds.map((info) => info.kind).sort()).toEqual([
 		'burkert',
+		'dehnen',
+		'double-power-law',
+		'einasto',
 		'exponential-disk',
 		'hernquist',
+		'isochrone',
+		'jaffe',
 		'kuzmin-disk',
+		'logarithmic',
 		'miyamoto-nagai',
 		'nfw',
 		'plummer',
 		'point-mass',
-		'pseudo-isothermal'
+		'pseudo-isothermal',
+		'sersic',
+		'tabulated'
 	]);
 	for (const { kind, label, help, source, lit, parameterSets } of componentKinds) {
 		for (const text of [label, help, source]) expect(text).not.toBe('');
@@ -341,7 +349,11 @@ test('every kind describes its parameters fully, and its initial values make a m
 				expect(ordered, `${kind} ${info.name}`).toEqual([...ordered].sort((a, b) => a - b));
 				if (info.scale === 'log') expect(info.usualMin).toBeGreaterThan(0);
 			}
-			const parameters = Object.fromEntries(set.parameters.map((p) => [p.name, p.initial]));
+			const parameters = Object.fromEntries([
+				...set.parameters.map((p) => [p.name, p.initial] as const),
+				...(set.choices ?? []).map((choice) => [choice.name, choice.initial] as const),
+				...(set.lists ?? []).map((list) => [list.name, list.initial] as const)
+			]);
 			const model = massModel({ components: [{ id: 'it', kind, parameters, lit }] });
 			expect(model.circularVelocity(8)).toBeGreaterThan(0);
 		}

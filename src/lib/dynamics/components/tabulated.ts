@@ -31,7 +31,7 @@ export const tabulated: ComponentMaker = {
 						name: 'massToLight',
 						label: 'Mass-to-light ratio',
 						unit: 'Msun/Lsun',
-						min: 0,
+						min: 0.001,
 						max: 100,
 						usualMin: 0.1,
 						usualMax: 5,
