@@ -30,3 +30,14 @@ export type {
 	ParameterSet,
 	ParameterValue
 } from './types';
+export { chiSquaredOf } from './fit/chiSquared';
+export { fitRotationCurve } from './fit/fitRotationCurve';
+export { speedBand } from './fit/speedBand';
+export type {
+	FitOptions,
+	FitPoint,
+	FitProgress,
+	FitResult,
+	FittedParameter,
+	FreeParameter
+} from './fit/types';
