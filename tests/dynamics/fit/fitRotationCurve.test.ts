@@ -86,7 +86,8 @@ describe.each(scipy)('$kind', ({ kind, shape, chiSquared, values, errors, correl
 				free: [halo('density'), halo(shape)]
 			}).chiSquared - result.chiSquared;
 		// A fiftieth of an error away the curve is a parabola: 1/2500 of 1.
-		near((fixed(value + 0.02 * error) + fixed(value - 0.02 * error)) / 2, 0.0004, 0.05);
+		// The fit's curvature leaves second derivatives of the model out, hence the tolerance.
+		near((fixed(value + 0.02 * error) + fixed(value - 0.02 * error)) / 2, 0.0004, 0.2);
 	});
 });
 
