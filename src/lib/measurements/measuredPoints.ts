@@ -2,7 +2,7 @@ import { DEGREE, kpcFromLightYears } from '../units';
 import type { MeasuredPoint, MeasuredRows, RadiusUnit, SpeedUnit } from './types';
 
 /** km/s in one unit of speed. */
-const speedIn: Record<SpeedUnit, number> = { 'km/s': 1, 'm/s': 0.001 };
+export const kmsIn = (unit: SpeedUnit): number => (unit === 'm/s' ? 0.001 : 1);
 
 /**
  * kpc in one unit of radius. An angle needs the distance: small angles, radius = distance × angle.
@@ -27,7 +27,7 @@ export function kpcIn(unit: RadiusUnit, distance: number | null): number {
 /** The rows of a table in kpc and km/s; those of an angle without a distance are not to be had: none. */
 export function measuredPoints(table: MeasuredRows): MeasuredPoint[] {
 	const length = kpcIn(table.radiusUnit, table.distance?.value ?? null);
-	const speed = speedIn[table.speedUnit];
+	const speed = kmsIn(table.speedUnit);
 	if (!(length > 0)) return [];
 	// Most tables are in these units already; then not even the last digit changes.
 	if (length === 1 && speed === 1) return table.rows.map((row) => ({ ...row }));

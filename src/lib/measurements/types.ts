@@ -34,3 +34,10 @@ export interface MeasuredRows {
 	/** As `MeasuredPoint`, in the units above. */
 	rows: readonly MeasuredPoint[];
 }
+
+/** A whole table as it is saved and exported: what was measured, by whom, in which units. */
+export interface MeasurementsInput extends MeasuredRows {
+	name: string;
+	/** Citation, or a plain statement that the points are invented. Never empty. */
+	source: string;
+}

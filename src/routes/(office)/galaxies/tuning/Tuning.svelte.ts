@@ -25,8 +25,11 @@ export class Tuning {
 	#history: History<GalaxyDocument>;
 	readonly #options: TuningOptions;
 	readonly mayEdit: boolean;
-	readonly points: readonly MeasuredPoint[];
-	readonly pointsName: string | undefined;
+	/** What the chart shows of what was measured, and the name of its table. */
+	points = $state.raw<readonly MeasuredPoint[]>([]);
+	pointsName = $state<string | undefined>();
+	/** One standard error either side of the total at `radii`; null without a fit that still holds. */
+	band = $state.raw<{ low: Float64Array; high: Float64Array } | null>(null);
 	/** False until the page answers: what is pressed before that would be lost. */
 	ready = $state(false);
 	/** Radius under the pointer, kpc; null where it is elsewhere. */

@@ -1,0 +1,2 @@
+export { keepFit } from './keepFit';
+export { listFits, readFit, type FitRead } from './readFits';
