@@ -6,7 +6,9 @@ import { may } from '$lib/server/permissions';
 import { contextOf } from '$lib/server/http/contextOf';
 import type { PageServerLoad } from './$types';
 
-export const load: PageServerLoad = async ({ locals, params }) => {
+export const load: PageServerLoad = async ({ locals, params, depends }) => {
+	// Named by whoever keeps a fit, so that the list shows it.
+	depends('farwheel:fits');
 	const ctx = contextOf(locals);
 	const [galaxy, fits] = await orError(
 		Promise.all([readGalaxy(ctx, params.id), listFits(ctx, params.id)])

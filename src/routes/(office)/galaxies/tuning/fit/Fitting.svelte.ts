@@ -128,7 +128,8 @@ export class Fitting {
 		this.#work?.cancel();
 		this.#work = null;
 		this.running = null;
-		cancelAnimationFrame(this.#frame);
+		if (this.#frame !== 0) cancelAnimationFrame(this.#frame);
+		this.#frame = 0;
 	}
 
 	/** Puts a result on the page as one step that can be undone. */
