@@ -1,6 +1,6 @@
 /**
- * ∫ t^(a−1) (1−t)^(b−1) dt from 0 to x, for a > 0, any b with a + b > 0, and x up to 1/2:
- * x^a (1−x)^b / a × Σ (a+b)_k/(a+1)_k x^k, all terms positive.
+ * ∫ t^(a−1) (1−t)^(b−1) dt from 0 to x, for a > 0, any b, and x up to 0.9:
+ * x^a (1−x)^b / a × Σ (a+b)_k/(a+1)_k x^k, all terms positive where a + b > 0.
  * Abramowitz and Stegun 1964, 26.5.4 in the form of 15.3.3.
  */
 export function betaBelow(a: number, b: number, x: number): number {
@@ -16,13 +16,20 @@ export function betaBelow(a: number, b: number, x: number): number {
 }
 
 /**
- * ∫ t^(a−1) (1−t)^(b−1) dt from x to 1/2, for any a and b and 0 < x ≤ 1/2: the binomial series of
- * (1−t)^(b−1) term by term. Where a + k is near 0 its term is nearly a logarithm and is taken so.
+ * How far up `betaBetween` may go for this b without its terms, of either sign, growing above their
+ * sum: 1/2, and less the larger b is.
  */
-export function betaToHalf(a: number, b: number, x: number): number {
-	const ratio = Math.log(0.5 / x);
+export const betaSeam = (b: number): number => (b > 4 ? Math.max(0.1, 2 / b) : 0.5);
+
+/**
+ * ∫ t^(a−1) (1−t)^(b−1) dt from x to top, for any a and b and 0 < x ≤ top ≤ betaSeam(b): the binomial
+ * series of (1−t)^(b−1) term by term. Where a + k is near 0 its term is nearly a logarithm and is
+ * taken so.
+ */
+export function betaBetween(a: number, b: number, x: number, top: number): number {
+	const ratio = Math.log(top / x);
 	let low = Math.exp(a * Math.log(x));
-	let high = Math.exp(-a * Math.LN2);
+	let high = Math.exp(a * Math.log(top));
 	let factor = 1;
 	let sum = 0;
 	for (let k = 0; k < 2000; k++) {
@@ -37,7 +44,7 @@ export function betaToHalf(a: number, b: number, x: number): number {
 		factor *= (k + 1 - b) / (k + 1);
 		if (factor === 0) break;
 		low *= x;
-		high *= 0.5;
+		high *= top;
 	}
 	return sum;
 }

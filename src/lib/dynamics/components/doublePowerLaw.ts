@@ -1,5 +1,5 @@
 import { G } from '../../units';
-import { betaBelow, betaToHalf } from '../incompleteBeta';
+import { betaBelow, betaBetween, betaSeam } from '../incompleteBeta';
 import type { ComponentMaker } from './ComponentMaker';
 import { densityParameter, lengthParameter } from './parameters';
 import { sphericalComponent, type SphericalProfile } from './sphericalComponent';
@@ -10,7 +10,7 @@ import { sphericalComponent, type SphericalProfile } from './sphericalComponent'
  *   M(r) = 4πρ0 rs³/α B_t((3−γ)/α, (β−3)/α)
  *   ∫ρ r dr from r outward = ρ0 rs²/α B_(1−t)((β−2)/α, (2−γ)/α)
  *
- * each taken from the end at which its series has positive terms, with 1/2 as the seam.
+ * each taken from the end at which its series loses no digits, with a seam between.
  */
 function profile(
 	density0: number,
@@ -23,18 +23,22 @@ function profile(
 	const [near, far] = [(2 - gamma) / alpha, (beta - 2) / alpha];
 	const volume = (4 * Math.PI * density0 * rs ** 3) / alpha;
 	const surface = (4 * Math.PI * G * density0 * rs ** 2) / alpha;
-	const halfMass = betaBelow(inner, outer, 0.5);
-	const halfOutside = betaBelow(far, near, 0.5);
+	// Seams in 1 − t for the mass and in t for what lies outside.
+	const [massSeam, outsideSeam] = [betaSeam(inner), betaSeam(far)];
+	const massToSeam = betaBelow(inner, outer, 1 - massSeam);
+	const outsideFromSeam = betaBelow(far, near, 1 - outsideSeam);
 
 	function mass(x: number): number {
 		const w = x ** alpha;
-		if (w <= 1) return betaBelow(inner, outer, w / (1 + w));
-		return halfMass + betaToHalf(outer, inner, 1 / (1 + w));
+		const rest = 1 / (1 + w);
+		if (rest >= massSeam) return betaBelow(inner, outer, w * rest);
+		return massToSeam + betaBetween(outer, inner, rest, massSeam);
 	}
 	function outside(x: number): number {
 		const w = x ** alpha;
-		if (w > 1) return betaBelow(far, near, 1 / (1 + w));
-		return halfOutside + betaToHalf(near, far, w / (1 + w));
+		const rest = 1 / (1 + w);
+		if (w * rest > outsideSeam) return betaBelow(far, near, rest);
+		return outsideFromSeam + betaBetween(near, far, w * rest, outsideSeam);
 	}
 	const enclosedMass = (r: number) => (r === 0 ? 0 : volume * mass(r / rs));
 	const cusp = gamma > 0;
@@ -57,7 +61,7 @@ function profile(
 		potential(r) {
 			if (r > 0) return -surface * outside(r / rs) - (G * enclosedMass(r)) / r;
 			if (gamma >= 2) return -Infinity;
-			return -surface * (halfOutside + betaBelow(near, far, 0.5));
+			return -surface * (outsideFromSeam + betaBelow(near, far, outsideSeam));
 		},
 		escapable: true
 	};
