@@ -5,13 +5,33 @@ const withComma = /^[+-]?(?:\d+,?\d*|,\d+)(?:[eEdD][+-]?\d+)?$/;
 const commaInside = /^[+-]?\d*,\d+(?:[eEdD][+-]?\d+)?$/;
 const pointInside = /^[+-]?\d*\.\d*(?:[eEdD][+-]?\d+)?$/;
 
-const missing = new Set(['', '-', '--', '---', '–', '—', '...', 'na', 'n/a', 'nan', 'null', 'none']);
+/** Longer cells are no numbers. */
+const longestNumber = 60;
 
-export const isMissing = (cell: string): boolean => missing.has(cell.trim().toLowerCase());
+const missing = new Set([
+	'',
+	'-',
+	'--',
+	'---',
+	'–',
+	'—',
+	'...',
+	'na',
+	'n/a',
+	'nan',
+	'null',
+	'none'
+]);
+
+export const isMissing = (cell: string): boolean =>
+	cell.length <= longestNumber && missing.has(cell.trim().toLowerCase());
 
 /** @returns NaN for what is no number; infinite for what is too large to be one */
 export function numberIn(cell: string, decimalComma: boolean): number {
-	const text = cell.trim().replace(/^−/, '-').replace(/([eEdD])−/, '$1-');
+	const text = cell
+		.trim()
+		.replace(/^−/, '-')
+		.replace(/([eEdD])−/, '$1-');
 	if (!(decimalComma ? withComma : pointed).test(text)) return NaN;
 	return Number(text.replace(',', '.').replace(/[dD]/, 'e'));
 }

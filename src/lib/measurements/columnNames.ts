@@ -76,6 +76,9 @@ const errorMarks = [
 	'u'
 ];
 
+/** Longer headings are sentences. */
+const longestName = 60;
+
 const keyOf = (name: string) =>
 	name
 		.toLowerCase()
@@ -104,6 +107,7 @@ function errorRank(key: string): number {
 
 /** What a column's name says it is, if anything. */
 export function roleByName(name: string): NameMatch | null {
+	if (name.length > longestName) return null;
 	const key = keyOf(name);
 	if (key === '') return null;
 	for (const role of Object.keys(names) as (keyof typeof names)[]) {

@@ -13,7 +13,10 @@ export interface CommentFacts {
 
 const number = String.raw`([+-]?(?:\d+\.?\d*|\.\d+)(?:[eE][+-]?\d+)?)`;
 const withError = String.raw`${number}\s*(?:(?:±|\+\/-|\+-)\s*${number})?\s*`;
-const distanceIn = new RegExp(String.raw`^(?:distance|dist|d)\s*[:=]\s*${withError}(Mpc|kpc)\b`, 'i');
+const distanceIn = new RegExp(
+	String.raw`^(?:distance|dist|d)\s*[:=]\s*${withError}(Mpc|kpc)\b`,
+	'i'
+);
 const inclinationIn = new RegExp(
 	String.raw`^(?:inclination|incl|inc|i)\s*[:=]\s*${withError}(?:degrees?|deg|°)?\s*$`,
 	'i'

@@ -1,7 +1,13 @@
 /** What a file begins with that is no table of text, and what to do about it. */
 const otherFiles: readonly [bytes: readonly number[], words: string][] = [
-	[[0x50, 0x4b, 0x03, 0x04], 'This is a spreadsheet or a ZIP file. Save the table as CSV and bring that.'],
-	[[0xd0, 0xcf, 0x11, 0xe0], 'This is an old spreadsheet file. Save the table as CSV and bring that.'],
+	[
+		[0x50, 0x4b, 0x03, 0x04],
+		'This is a spreadsheet or a ZIP file. Save the table as CSV and bring that.'
+	],
+	[
+		[0xd0, 0xcf, 0x11, 0xe0],
+		'This is an old spreadsheet file. Save the table as CSV and bring that.'
+	],
 	[[0x25, 0x50, 0x44, 0x46], 'This is a PDF. Copy the table out of it and paste it here.'],
 	[[0x1f, 0x8b], 'This file is compressed. Unpack it first.'],
 	[[0x89, 0x50, 0x4e, 0x47], 'This is a picture. Bring the table as text.']

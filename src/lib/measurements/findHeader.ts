@@ -63,23 +63,26 @@ export function findHeader(
 ): FoundHeader {
 	const cellsOf = (record: TableRecord) => withoutEmptyEnd(record.cells);
 	if (asked === false) return { headings: null, before: 0, broken: [] };
+	const isBroken = (one: TableRecord) => one.fault !== null || numbersIn(one.cells) > 0;
 	const isRow = (record: TableRecord) => numbersIn(record.cells) >= 2;
 	let before = records.findIndex(isRow);
 	if (before === -1) before = records.length;
 	if (asked) before = Math.max(1, before);
 	const above = records.slice(0, before);
-	let at = asked ? 0 : above.findLastIndex((record) => rolesIn(record.cells) > 0);
+	let at = asked ? 0 : above.findLastIndex((one) => !one.fault && rolesIn(one.cells) > 0);
 	if (at === -1) {
-		at = above.findLastIndex((one) => numbersIn(one.cells) === 0 && one.cells.length === columns);
+		at = above.findLastIndex(
+			(one) => !one.fault && numbersIn(one.cells) === 0 && one.cells.length === columns
+		);
 	}
 	if (at === -1) {
 		const firstRow = records[before]?.line ?? Infinity;
 		const headings = inComments(comments, separator, columns, firstRow);
-		return { headings, before, broken: above.filter((one) => numbersIn(one.cells) > 0) };
+		return { headings, before, broken: above.filter(isBroken) };
 	}
 	const units = above.findIndex((record, i) => i > at && isUnits(record.cells));
 	const broken = above.filter(
-		(record, i) => i !== at && i !== units && (i > at || numbersIn(record.cells) > 0)
+		(record, i) => i !== at && i !== units && (i > at || isBroken(record))
 	);
 	const headings = headingsFrom(
 		cellsOf(above[at]),

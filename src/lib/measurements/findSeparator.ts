@@ -1,4 +1,6 @@
 import { isMissing, isNumeric } from './cells';
+import { roleByName } from './columnNames';
+import { splitHeading } from './headingUnits';
 import { separators, type Separator } from './reading';
 import { splitLine } from './splitLine';
 
@@ -11,7 +13,11 @@ export function mostCommon(counts: readonly number[]): number {
 	return best;
 }
 
-/** Share of the cells that are numbers, over lines of the usual length. */
+/** Whether some line names two columns or more: that is no accident. */
+const namesColumns = (split: readonly string[][]): boolean =>
+	split.some((cells) => cells.filter((cell) => roleByName(splitHeading(cell).name)).length >= 2);
+
+/** Share of the cells that are numbers, over lines of the usual length, and 1 more for headings. */
 function score(lines: readonly string[], separator: Separator): number {
 	const split = lines.map((line) => withoutEmptyEnd(splitLine(line, separator).cells));
 	const usual = mostCommon(split.map((cells) => cells.length));
@@ -22,7 +28,8 @@ function score(lines: readonly string[], separator: Separator): number {
 		const numbers = filled.filter(isNumeric).length;
 		return numbers < 2 ? 0 : numbers / filled.length;
 	});
-	return good.reduce((sum, share) => sum + share, 0) / lines.length;
+	const named = namesColumns(split.slice(0, 20)) ? 1 : 0;
+	return named + good.reduce((sum, share) => sum + share, 0) / lines.length;
 }
 
 /** Cells without the empty ones at the end, which stray separators leave. */

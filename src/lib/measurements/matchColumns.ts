@@ -11,7 +11,9 @@ export interface ColumnMatch {
 /** Numbers of one column; empty where some of its cells are none. */
 function numbersOf(rows: readonly (readonly string[])[], column: number, comma: boolean): number[] {
 	const cells = rows.map((cells) => cells[column] ?? '').filter((cell) => !isMissing(cell));
-	const numbers = cells.map((cell) => numberIn(cell, comma)).filter((value) => !Number.isNaN(value));
+	const numbers = cells
+		.map((cell) => numberIn(cell, comma))
+		.filter((value) => !Number.isNaN(value));
 	return numbers.length * 10 < cells.length * 9 ? [] : numbers;
 }
 

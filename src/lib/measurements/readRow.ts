@@ -7,8 +7,9 @@ import type { Measured, MeasuredPoint, RadiusUnit, SpeedUnit } from './types';
 export interface RowSettings {
 	/** Column of each role. */
 	columns: Partial<Record<ColumnRole, number>>;
-	/** Cells of a usual row. */
+	/** Cells a row may have, and those it must have. */
 	count: number;
+	least: number;
 	comma: boolean;
 	radiusUnit: RadiusUnit;
 	speedUnit: SpeedUnit;
@@ -49,12 +50,11 @@ export function faultOf(
 
 /** One line as a row, or why it is none. */
 export function readRow(cells: readonly string[], settings: RowSettings): RowRead {
-	const { columns, count, comma, sameError } = settings;
+	const { columns, count, least, comma, sameError } = settings;
 	const extra = cells.slice(count).some((cell) => cell.trim() !== '');
-	if (extra || cells.length < count) {
-		return {
-			reason: `It has ${cells.length} ${cells.length === 1 ? 'cell' : 'cells'} where the table has ${count}.`
-		};
+	if (extra || cells.length < least) {
+		const has = cells.length === 1 ? 'one cell' : `${cells.length} cells`;
+		return { reason: `It has ${has} where the other lines have ${extra ? count : least}.` };
 	}
 	const row: MeasuredPoint = { radius: 0, speed: 0, error: sameError ?? 0 };
 	for (const role of ['radius', 'speed', 'error', 'gas', 'disc', 'bulge'] as const) {

@@ -47,7 +47,7 @@ export function* recordsOf(
 	lines: readonly TextLine[],
 	separator: Separator
 ): Generator<TableRecord> {
-	for (let at = 0; at < lines.length; ) {
+	for (let at = 0; at < lines.length;) {
 		const { record, next } = readRecord(lines, at, separator);
 		yield record;
 		at = next;
