@@ -12,7 +12,7 @@ export function number(value: number, digits = 4): string {
 		.replace('+', '')
 		.replace('-', '⁻')
 		.replace(/\d/g, (digit) => superscripts[Number(digit)]);
-	return `${front} × 10${power}`;
+	return `${Number(front)} × 10${power}`;
 }
 
 export const quantity = (value: number, unit: string): string => `${number(value)} ${unit}`.trim();
