@@ -5,14 +5,12 @@ import type { Context } from '../../../src/lib/server/context';
 import { auditLog, shows } from '../../../src/lib/server/db/schema';
 import { AppError } from '../../../src/lib/server/errors';
 import {
-	addMeasurements,
 	archiveGalaxy,
 	copyFromShelf,
 	copyGalaxy,
 	createGalaxy,
 	galaxyFilterSchema,
 	listGalaxies,
-	listMeasurements,
 	readGalaxy,
 	renameGalaxy,
 	restoreGalaxy,
@@ -20,6 +18,7 @@ import {
 	shelf,
 	startingShapes
 } from '../../../src/lib/server/galaxies';
+import { addMeasurements, listMeasurements } from '../../../src/lib/server/measurements';
 import { galaxyDocumentSchema } from '../../../src/lib/show/galaxy';
 import { joinVenue, makeDocument, makeVenue, useDatabase } from '../shows/support';
 

@@ -6,7 +6,7 @@ import { audit, inTransaction, requireRole, type Context } from '../context';
 import { fits } from '../db/schema';
 import { AppError } from '../errors';
 import { findGalaxy } from '../galaxies/findGalaxy';
-import { measurementsOf, type MeasurementTable } from '../galaxies/measurements';
+import { measurementsOf, type MeasurementTable } from '../measurements/measurementsOf';
 import { parseOrRefuse } from '../parseOrRefuse';
 
 /** How far a record's χ² may be from what the kept points give: the last digits of two machines. */

@@ -4,7 +4,7 @@ import type { Queryable } from '../db/database';
 import { galaxies, measurements } from '../db/schema';
 import { AppError } from '../errors';
 import { findGalaxy } from './findGalaxy';
-import { measurementsOf } from './measurements';
+import { measurementsOf } from '../measurements/measurementsOf';
 import { parseGalaxy } from './parseGalaxy';
 import { readShelf } from './shelf';
 import { startingShapes } from './startingShapes';

@@ -7,7 +7,6 @@ export {
 	type GalaxyFilter,
 	type GalaxyListed
 } from './listGalaxies';
-export { addMeasurements, listMeasurements, type MeasurementTable } from './measurements';
 export { readGalaxy, type GalaxyRead } from './readGalaxy';
 export { renameGalaxy, saveGalaxy, type Saved } from './saveGalaxy';
 export { readShelf, shelf, type ShelfEntry } from './shelf';

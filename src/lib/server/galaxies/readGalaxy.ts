@@ -3,7 +3,7 @@ import type { GalaxyDocument } from '../../show/galaxy';
 import { queryable, requireRole, type Context } from '../context';
 import { users } from '../db/schema';
 import { findGalaxy } from './findGalaxy';
-import { measurementsOf, type MeasurementTable } from './measurements';
+import { measurementsOf, type MeasurementTable } from '../measurements/measurementsOf';
 import { showsUsing } from './showsUsing';
 
 export interface GalaxyRead {
