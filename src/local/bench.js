@@ -6,7 +6,7 @@ import { promisify } from 'node:util';
 
 /**
  * Prints measured figures and ratios: the plain painter, the one-pass WebGL painter and the usual
- * cube-camera fisheye on one film with the same stars, and the time of a full retune.
+ * cube-camera fisheye on one film with the same stars; full retunes, fits, and reading a large table.
  *
  *   node src/local/bench.js
  */
@@ -17,7 +17,7 @@ const root = join(dirname(fileURLToPath(import.meta.url)), '../..');
 const chromium = process.env.CHROMIUM_PATH ?? '/usr/bin/chromium';
 
 /** @param {number} value */
-const ms = (value) => `${value.toFixed(1).padStart(8)} ms`;
+const ms = (value) => `${value.toFixed(value < 1 ? 2 : 1).padStart(8)} ms`;
 
 async function inNode() {
 	const { stdout } = await promisify(execFile)(
@@ -80,7 +80,11 @@ const rows = [
 	['plain painter, page with canvas', page.plain],
 	['WebGL painter, one pass', page.webgl],
 	['cube camera to fisheye, three.js', page.cube],
-	['retune, 8 components, 1,024 radii', node.retune]
+	['retune, 8 components, 1,024 radii', node.retune],
+	['retune, bulge, disc and halo', node.smallRetune],
+	['speeds of a million stars', node.speeds],
+	['fit, 3 free, 30 points, 12 starts', node.fit],
+	['reading 20,000 rows, 5 MB', node.read]
 ];
 for (const [name, { median, p99 }] of rows)
 	console.log(`${name.padEnd(34)} ${ms(median)}   ${ms(p99)}`);

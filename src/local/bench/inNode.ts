@@ -1,4 +1,5 @@
 import { PlainPainter } from '../../lib/picture/plainPainter';
+import { benchFit, benchMillionSpeeds, benchRead, benchSmallRetune } from './dynamics';
 import { benchRetune } from './retune';
 import { benchFrame, times } from './subject';
 
@@ -10,4 +11,13 @@ const plain = times(() => {
 	step();
 	painter.paint(frame);
 }, 120);
-console.log(JSON.stringify({ plain, retune: benchRetune() }));
+console.log(
+	JSON.stringify({
+		plain,
+		retune: benchRetune(),
+		smallRetune: benchSmallRetune(),
+		speeds: benchMillionSpeeds(),
+		fit: benchFit(),
+		read: benchRead()
+	})
+);
