@@ -40,7 +40,7 @@ export function launchApp({ root, dev, env, port, host, plainLog }) {
 	const child = spawn(process.execPath, args, {
 		cwd: root,
 		// Above the limits of the app's own pages, so that they can answer 413 in their own words.
-		env: { BODY_SIZE_LIMIT: '2M', ...env },
+		env: { BODY_SIZE_LIMIT: '6M', ...env },
 		detached: true,
 		stdio: ['ignore', 'pipe', 'pipe']
 	});

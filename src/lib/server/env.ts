@@ -28,11 +28,11 @@ export const environmentSchema = z.object({
 	FARWHEEL_MAIL_PAGE: z.url().optional(),
 	/** Header that carries the visitor's address behind a trusted proxy; adapter-node reads it too. */
 	ADDRESS_HEADER: z.string().optional(),
-	/** Largest body the web server reads, such as 2M; adapter-node reads it. */
+	/** Largest body the web server reads, such as 6M; adapter-node reads it. */
 	BODY_SIZE_LIMIT: z
 		.string()
 		.regex(/^\d+[KMG]?$/, 'BODY_SIZE_LIMIT is a number of bytes, or one with K, M or G')
-		.default('2M'),
+		.default('6M'),
 	/** Seconds that open requests get at a stop; adapter-node reads it. */
 	SHUTDOWN_TIMEOUT: z.coerce.number().int().min(0).max(600).default(3),
 	/** The browser that tests and the bench drive; the app itself starts none. */
