@@ -18,6 +18,9 @@ export const LIGHT_YEARS_PER_KPC = 3261.563777;
 /** Metres in one kpc: the IAU parsec, 648 000/π au (IAU 2015 resolution B2), au of IAU 2012 B2. */
 export const METRES_IN_KPC = (1000 * 648_000 * 149_597_870_700) / Math.PI;
 
+/** km/s, exact by the definition of the metre (SI, 1983). */
+export const LIGHT_SPEED = 299_792.458;
+
 /** Playback ticks in one second of show time. */
 export const TICKS_PER_SECOND = 60;
 

@@ -41,3 +41,18 @@ export type {
 	FittedParameter,
 	FreeParameter
 } from './fit/types';
+export { countBound, energies } from './orbits/energies';
+export { integrateOrbits, usualStep, type OrbitOptions } from './orbits/integrateOrbits';
+export { makeParticles, type Particles } from './orbits/particles';
+export {
+	circularSpeedSlope,
+	oortConstants,
+	peakSpeed,
+	resonances,
+	type OortConstants,
+	type Resonances
+} from './curveDerived';
+export { discSurfaceDensity, toomreQ } from './discStability';
+export { halfMassRadius, overtaking, type Overtaking } from './massDerived';
+export { hydrogenLine, lineFrequency, lineShift } from './radioLine';
+export { halfLightRadius3d, virialMass, wolfAssumptions, wolfMass } from './swarm';
