@@ -1,5 +1,6 @@
 export { addMeasurements } from './addMeasurements';
 export { citeMeasurements, leavePointOut, putPointBack } from './changeMeasurements';
+export { useLightCurves } from './useLightCurves';
 export type { MeasurementTable } from './measurementsOf';
 export {
 	exportMeasurements,
